@@ -1,0 +1,141 @@
+import { oneSide, type CataloguePoint } from './catalogue-point.ts';
+
+const shoulderLength: CataloguePoint = {
+  name: 'Shoulder length',
+  shortName: 'Shoulder length',
+  nameFrom: 'ISO 8559',
+  otherNames: [
+    'shoulder seam',
+    'shoulder seam length',
+    'neck to shoulder',
+    'neck to shoulder point',
+    'single shoulder',
+    'length of shoulder',
+  ],
+  howTo: 'Measure from the side of the neck, where it meets the shoulder, straight out to the shoulder bone.',
+  group: 'torso',
+};
+
+const shoulderSlope: CataloguePoint = {
+  name: 'Shoulder slope',
+  shortName: 'Shoulder slope',
+  nameFrom: 'trade',
+  otherNames: ['shoulder drop', 'slope of shoulder'],
+  howTo:
+    'Hold a ruler level at the side of the neck, out over the shoulder. Measure straight down from it to the shoulder bone: the drop, as a length.',
+  group: 'torso',
+};
+
+/** Widths, arcs and the shoulder: open measures of the torso, and what the catalogue says of them. */
+export const WIDTH_POINTS = {
+  shoulderLength,
+  shoulderLengthLeft: oneSide(shoulderLength, 'left'),
+  shoulderLengthRight: oneSide(shoulderLength, 'right'),
+  shoulderSlope,
+  shoulderSlopeLeft: oneSide(shoulderSlope, 'left'),
+  shoulderSlopeRight: oneSide(shoulderSlope, 'right'),
+  shoulderWidth: {
+    name: 'Shoulder width',
+    shortName: 'Shoulder width',
+    nameFrom: 'ISO 8559',
+    otherNames: [
+      'shoulder to shoulder',
+      'across shoulder',
+      'across shoulders',
+      'cross shoulder',
+      'shoulder breadth',
+      'point to point shoulder',
+    ],
+    howTo: 'Measure across the back from shoulder bone to shoulder bone, the tape following the back.',
+    group: 'torso',
+  },
+  backWidth: {
+    name: 'Back width',
+    shortName: 'Back width',
+    nameFrom: 'ISO 8559',
+    otherNames: ['across back', 'cross back', 'xback', 'x back', 'back breadth', 'width of back'],
+    howTo:
+      'Let the arms hang. Measure across the back from arm to arm, halfway between the shoulder and the armpit.',
+    group: 'torso',
+  },
+  frontWidth: {
+    name: 'Front width',
+    shortName: 'Front width',
+    nameFrom: 'trade',
+    otherNames: [
+      'across front',
+      'cross front',
+      'across chest',
+      'cross chest',
+      'front breadth',
+      'width of front',
+    ],
+    howTo:
+      'Let the arms hang. Measure across the front from arm to arm, halfway between the shoulder and the armpit.',
+    group: 'torso',
+  },
+  bustPointSpan: {
+    name: 'Width between bust points',
+    chestName: 'Width between chest points',
+    shortName: 'Bust point span',
+    shortChestName: 'Chest point span',
+    nameFrom: 'trade',
+    otherNames: [
+      'bust span',
+      'bust point to bust point',
+      'bp to bp',
+      'apex to apex',
+      'bust point width',
+      'apex width',
+      'apex span',
+      'nipple to nipple',
+      'point to point bust',
+      'bust separation',
+    ],
+    howTo: 'Measure straight across from the fullest point of one side of the {bust} to that of the other.',
+    group: 'torso',
+  },
+  bustFrontArc: {
+    name: 'Front bust arc',
+    chestName: 'Front chest arc',
+    shortName: 'Front bust arc',
+    shortChestName: 'Front chest arc',
+    nameFrom: 'trade',
+    otherNames: [
+      'bust front arc',
+      'bust arc front',
+      'front bust',
+      'bust front',
+      'front chest',
+      'chest front',
+    ],
+    howTo: 'At the level of the {bust}, measure across the front from side seam to side seam.',
+    group: 'torso',
+  },
+  bustBackArc: {
+    name: 'Back bust arc',
+    chestName: 'Back chest arc',
+    shortName: 'Back bust arc',
+    shortChestName: 'Back chest arc',
+    nameFrom: 'trade',
+    otherNames: ['bust back arc', 'bust arc back', 'back bust', 'bust back', 'back chest', 'chest back'],
+    howTo: 'At the level of the {bust}, measure across the back from side seam to side seam.',
+    group: 'torso',
+  },
+  hipFrontArc: {
+    name: 'Front hip arc',
+    shortName: 'Front hip arc',
+    nameFrom: 'trade',
+    otherNames: ['hip front arc', 'hip arc front', 'front hip', 'hip front'],
+    howTo: 'At the level of the hip, measure across the front from side seam to side seam.',
+    group: 'torso',
+  },
+  hipBackArc: {
+    name: 'Back hip arc',
+    shortName: 'Back hip arc',
+    nameFrom: 'trade',
+    otherNames: ['hip back arc', 'hip arc back', 'back hip', 'hip back'],
+    howTo: 'At the level of the hip, measure across the back from side seam to side seam.',
+    group: 'torso',
+  },
+} as const satisfies Record<string, CataloguePoint>;
