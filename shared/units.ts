@@ -48,17 +48,16 @@ const UNIT_WORDS: [RegExp, LengthUnit][] = [
 ];
 
 /**
- * Reads one length: `95.2`, `95,2 cm`, `952 mm`, `37.375 in`, `37 3/8`, `37-3/8"`, `37⅜`, `3/8`.
+ * Reads one length: `95.2`, `95,2 cm`, `952 mm`, `37.375 in`, `37 3/8`, `37-3/8"`, `37⅜`, `3/8`; digits of full width too.
  * `assumed` is the unit where none is written. Empty and bad input answer `ok: false` with a sentence; it never
- * throws. A comma or point followed by exactly three digits after one to three (`1,050`) could mean two
- * numbers and is refused as ambiguous, except `0,…` and in inches, where it can only be a decimal (`37.375`).
+ * throws. Refused as ambiguous: one digit, a comma or point and three digits (`1,050`), except in inches, where it can
+ * only be a decimal (`1.375`); and a fraction other than a half with no unit written where centimetres or millimetres
+ * are assumed (`37 3/8` is most likely in inches). Feet (`5' 6"`) are refused in words.
  */
 export function parseLength(text: string, assumed: LengthUnit): ParsedLength | LengthError {
-  let rest = text
-    .normalize('NFC')
-    .replace(/[\u00a0\u2009\u202f\u2007]/g, ' ')
-    .trim();
+  let rest = plain(text);
   if (rest === '') return { ok: false, code: 'empty', words: 'Nothing is written here.' };
+  if (/\d\s*(?:['’′]|ft\b|feet\b|foot\b)(?!['’′]\s*$)/i.test(rest)) return feet(rest);
   let unit = assumed;
   let unitWritten = false;
   for (const [pattern, found] of UNIT_WORDS) {
@@ -68,10 +67,6 @@ export function parseLength(text: string, assumed: LengthUnit): ParsedLength | L
     unitWritten = true;
     break;
   }
-  rest = rest
-    .replace(/[½¼¾⅛⅜⅝⅞⅓⅔]/g, (sign) => ` ${VULGAR[sign] ?? sign}`)
-    .replace(/\u2044/g, '/')
-    .trim();
   if (/^[-−–]/.test(rest)) {
     return {
       ok: false,
@@ -79,43 +74,92 @@ export function parseLength(text: string, assumed: LengthUnit): ParsedLength | L
       words: 'A length cannot be negative: write it without the minus sign.',
     };
   }
-  const value = readNumber(rest, unit);
+  const value = readMm(rest, unit, unitWritten);
   if (typeof value !== 'number') return value;
-  return { ok: true, mm: value * MM_PER[unit], unit, unitWritten };
+  return { ok: true, mm: value, unit, unitWritten };
 }
 
-function readNumber(text: string, unit: LengthUnit): number | LengthError {
-  const mixed = /^(?:(\d{1,6})\s*[- ]\s*)?(\d{1,3})\s*\/\s*(\d{1,3})$/.exec(text);
-  if (mixed) return readFraction(Number(mixed[1] ?? '0'), Number(mixed[2]), Number(mixed[3]));
-  if (!/^\d{0,9}(?:[.,]\d{1,9})?$/.test(text) || text === '') {
-    const example = unit === 'in' ? '37 3/8 or 37.375' : unit === 'cm' ? '95.2' : '952';
-    return {
-      ok: false,
-      code: 'notALength',
-      words: `“${shorten(text)}” is not a length: write it like ${example}.`,
-    };
+/** Signs of one meaning made one: fraction signs, wide digits, odd blanks. */
+function plain(text: string): string {
+  return text
+    .replace(/[½¼¾⅛⅜⅝⅞⅓⅔]/g, (sign) => ` ${VULGAR[sign] ?? sign}`)
+    .replace(/[″”]/g, '"')
+    .normalize('NFKC')
+    .replace(/\u2044/g, '/')
+    .replace(/\s+/g, ' ')
+    .trim();
+}
+
+function feet(text: string): LengthError {
+  return {
+    ok: false,
+    code: 'notALength',
+    words: `“${shorten(text)}” is in feet: write it in inches alone (5 ft 6 in is 66 in), or in centimetres.`,
+  };
+}
+
+function readMm(text: string, unit: LengthUnit, unitWritten: boolean): number | LengthError {
+  const mixed = /^(?:(\d{1,6}) ?[- ] ?)?(\d{1,3}) ?\/ ?(\d{1,3})$/.exec(text);
+  if (mixed) {
+    const isHalf = mixed[2] === '1' && mixed[3] === '2';
+    if (unit !== 'in' && !unitWritten && !isHalf) return fractionWithoutUnit(text, unit);
+    return readFraction(Number(mixed[1] ?? '0'), Number(mixed[2]), Number(mixed[3]), unit);
   }
-  if (unit !== 'in' && /^[1-9]\d{0,2}[.,]\d{3}$/.test(text)) {
-    const plain = text.replace(/[.,]/, '');
+  if (!/^(?:\d{1,9}(?:[.,]\d{0,9})?|[.,]\d{1,9})$/.test(text)) return notALength(text, unit);
+  if (unit !== 'in' && /^[1-9][.,]\d{3}$/.test(text)) {
+    const thousands = text.replace(/[.,]/, '');
     const decimal = String(Number(text.replace(',', '.')));
     return {
       ok: false,
       code: 'ambiguous',
-      words: `“${text}” could be ${plain} or ${decimal}: write one of those.`,
+      words: `“${text}” could be ${thousands} or ${decimal}: write one of those.`,
     };
   }
-  return Number(text.replace(',', '.'));
+  const digits = text.replace(',', '.');
+  // The point is moved in the text, not multiplied: 1.005 × 10 would not be 10.05 to the last place.
+  return unit === 'in' ? inchesToMm(Number(digits)) : Number(`${digits}${unit === 'cm' ? 'e1' : ''}`);
 }
 
-function readFraction(whole: number, part: number, of: number): number | LengthError {
+/** Through whole tenths: 37.375 × 25.4 is 949.3249999…, 37.375 × 254 ÷ 10 is 949.325. */
+function inchesToMm(inches: number): number {
+  return (inches * 254) / 10;
+}
+
+function notALength(text: string, unit: LengthUnit): LengthError {
+  const unitInside = /^(\d+) ?(?:in|ins|inch|inches|") ?(\d+ ?\/ ?\d+)$/i.exec(text);
+  if (unitInside) {
+    return {
+      ok: false,
+      code: 'notALength',
+      words: `“${shorten(text)}”: write the unit at the end, ${unitInside[1] ?? ''} ${unitInside[2] ?? ''} in.`,
+    };
+  }
+  const example = unit === 'in' ? '37 3/8 or 37.375' : unit === 'cm' ? '95.2' : '952';
+  return {
+    ok: false,
+    code: 'notALength',
+    words: `“${shorten(text)}” is not a length: write it like ${example}.`,
+  };
+}
+
+function fractionWithoutUnit(text: string, unit: LengthUnit): LengthError {
+  return {
+    ok: false,
+    code: 'ambiguous',
+    words: `“${shorten(text)}” has a fraction, as inches do: write ${shorten(text)} in, or the number in ${unit} with a decimal point.`,
+  };
+}
+
+function readFraction(whole: number, part: number, of: number, unit: LengthUnit): number | LengthError {
   if (of === 0 || part >= of) {
     return {
       ok: false,
       code: 'badFraction',
-      words: `${part}/${of} is not a part of an inch: the upper number is smaller than the lower, as in 3/8.`,
+      words: `${part}/${of} is not a part of one: the upper number is smaller than the lower, as in 3/8.`,
     };
   }
-  return whole + part / of;
+  const value = whole + part / of;
+  return unit === 'in' ? inchesToMm(value) : value * MM_PER[unit];
 }
 
 function shorten(text: string): string {
