@@ -1,15 +1,5 @@
 import { z } from 'zod';
 
-/** What somebody may do on this instance. */
-export const ROLES = ['member', 'teacher', 'admin'] as const;
-export type Role = (typeof ROLES)[number];
-
-/** Who is signed in. */
-export const meSchema = z.object({
-  user: z.object({ id: z.uuid(), name: z.string(), email: z.email(), role: z.enum(ROLES) }).nullable(),
-});
-export type Me = z.infer<typeof meSchema>;
-
 /** The fewest characters a password may have. */
 export const PASSWORD_MIN = 10;
 
@@ -20,7 +10,7 @@ export const signInSchema = z.object({
 
 export const signUpSchema = z.object({
   name: z.string().trim().min(1, 'Write the name we should call you by.').max(80),
-  email: z.email('Write an e-mail address, such as name@example.org.'),
+  email: z.email('Write an e-mail address, such as name@example.org.').max(254),
   password: z
     .string()
     .min(PASSWORD_MIN, `Use at least ${PASSWORD_MIN} characters; a few words in a row are easy to remember.`)

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod/mini';
 
 /**
  * The closed list of problem types (RFC 9457). A type's URI is `/problems/<name>`; its title is fixed, its
@@ -25,14 +25,17 @@ export type ProblemName = keyof typeof PROBLEMS;
 /** One field at fault: a JSON pointer into what was sent, and a sentence saying what would be right. */
 export const fieldProblemSchema = z.object({ pointer: z.string(), detail: z.string() });
 
-/** The body of every `application/problem+json` answer. */
+/**
+ * The body of every `application/problem+json` answer. Written with zod's small form, since every page may have to
+ * read one and the front page is to stay light.
+ */
 export const problemSchema = z.object({
   type: z.string(),
   title: z.string(),
-  status: z.number().int(),
-  detail: z.string().optional(),
-  errors: z.array(fieldProblemSchema).optional(),
-  requestId: z.string().optional(),
+  status: z.int(),
+  detail: z.optional(z.string()),
+  errors: z.optional(z.array(fieldProblemSchema)),
+  requestId: z.optional(z.string()),
 });
 
 /** One field at fault. */

@@ -1,0 +1,26 @@
+import type { RequestHandler } from 'express';
+import { Problem } from './problem.ts';
+
+const READING = new Set(['GET', 'HEAD', 'OPTIONS']);
+
+/**
+ * Refuses a change that a page of another site asks for. Browsers put `Origin` on every request that changes
+ * something and no page can forge it; a request without one is not from our own pages either.
+ */
+export function checkOrigin(trusted: readonly string[]): RequestHandler {
+  const ours = new Set(trusted);
+  return (request, _response, next) => {
+    if (READING.has(request.method)) {
+      next();
+      return;
+    }
+    const origin = request.get('origin');
+    if (origin !== undefined && ours.has(origin)) {
+      next();
+      return;
+    }
+    throw new Problem('foreignOrigin', {
+      detail: `Changes are accepted from ${trusted.join(' and ')} only. Open Leeway at one of these addresses.`,
+    });
+  };
+}
