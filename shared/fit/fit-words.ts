@@ -75,6 +75,10 @@ export const CAUTION_CODES = [
   'notMeasured',
   /** The chart's values fall from one size to a larger one: the point abstains. */
   'chartFalls',
+  /** The pattern gives this point at some sizes only: the point abstains. */
+  'givenAtSomeSizes',
+  /** Nothing opens, and the opening is smaller than what must pass through it. */
+  'doesNotPass',
   /** Only the chart is published here: the ease is the drafter's secret. */
   'easeUnknown',
   /** Only finished measurements are published and the handbook has no target ease: only the floor acts. */

@@ -1,6 +1,6 @@
 import { queryOptions } from '@tanstack/react-query';
 import { request } from '../api/request.ts';
-import { meSchema } from '../../shared/account.ts';
+import { meSchema } from '../../shared/me.ts';
 
 /** Who is signed in, or nobody. */
 export const meQuery = queryOptions({

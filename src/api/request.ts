@@ -1,4 +1,4 @@
-import type { z } from 'zod';
+import * as z from 'zod/mini';
 import { problemSchema } from '../../shared/problem.ts';
 import { ProblemError } from './problem-error.ts';
 
@@ -10,13 +10,13 @@ interface RequestOptions {
 }
 
 /** Asks the server and parses the answer: nothing unparsed is trusted. Throws `ProblemError` for anything else. */
-export async function request<T extends z.ZodType>(
+export async function request<T extends z.core.$ZodType>(
   path: string,
   schema: T,
   options: RequestOptions = {},
 ): Promise<z.output<T>> {
   const response = await send(path, options);
-  return schema.parse(await response.json());
+  return z.parse(schema, await response.json());
 }
 
 /** As `request`, for answers without a body (204). */

@@ -1,5 +1,6 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
 import { z } from 'zod';
+import type { GarmentKind } from '../../shared/fit/fit-words.ts';
 import { pageOf } from '../../shared/paging.ts';
 import {
   importDraftSchema,
@@ -17,15 +18,15 @@ import {
 } from '../../shared/patterns/patterns.schema.ts';
 import { request, requestNothing } from '../api/request.ts';
 
-export const patternsQuery = (page = 1, q = '') =>
+export const patternsQuery = (page = 1, q = '', kind: GarmentKind | null = null) =>
   queryOptions({
-    queryKey: ['patterns', 'list', { page, q }],
-    queryFn: ({ signal }) =>
-      request(
-        `/api/patterns?${new URLSearchParams({ page: String(page), ...(q ? { q } : {}) }).toString()}`,
-        pageOf(patternSummarySchema),
-        { signal },
-      ),
+    queryKey: ['patterns', 'list', { page, q, kind }],
+    queryFn: ({ signal }) => {
+      const asked = { page: String(page), ...(q ? { q } : {}), ...(kind ? { kind } : {}) };
+      return request(`/api/patterns?${new URLSearchParams(asked).toString()}`, pageOf(patternSummarySchema), {
+        signal,
+      });
+    },
   });
 
 export const patternQuery = (patternId: string) =>
@@ -69,11 +70,16 @@ function usePatternMutation<Input, Output>(act: (input: Input) => Promise<Output
   });
 }
 
-/** Every change of a draft answers the draft as it now reads: no second request is needed. */
-function useDraftMutation<Input>(act: (input: Input) => Promise<ImportDraft>) {
+/**
+ * Every change of a draft answers the draft as it now reads: no second request is needed. Changes of one draft are sent
+ * one after the other (`scope`), so that the answer of an earlier one never stands over a later one's.
+ */
+function useDraftMutation<Input>(draftId: string, act: (input: Input) => Promise<ImportDraft>) {
   const client = useQueryClient();
   return useMutation({
     mutationFn: act,
+    scope: { id: `import ${draftId}` },
+    onMutate: () => client.cancelQueries({ queryKey: draftQuery(draftId).queryKey }),
     onSuccess: (draft) => {
       client.setQueryData(draftQuery(draft.id).queryKey, draft);
       return client.invalidateQueries({ queryKey: ['imports', 'list'] });
@@ -86,44 +92,59 @@ export const useUpdatePattern = (patternId: string) =>
     request(`/api/patterns/${patternId}`, patternSchema, { method: 'PATCH', body }),
   );
 
-export const useDeletePattern = () =>
-  usePatternMutation((patternId: string) =>
-    requestNothing(`/api/patterns/${patternId}`, { method: 'DELETE' }),
-  );
+/** What shows the pattern stands until the page is left: asking for it again would find nothing. */
+export function useDeletePattern() {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (patternId: string) => requestNothing(`/api/patterns/${patternId}`, { method: 'DELETE' }),
+    onSuccess: () => {
+      client.removeQueries({ queryKey: ['patterns', 'list'] });
+      // Its unfinished imports and its saved plans went with it.
+      client.removeQueries({ queryKey: ['imports'] });
+      client.removeQueries({ queryKey: ['plans'] });
+    },
+  });
+}
 
-export const useStartImport = () =>
-  useDraftMutation((body: { patternId?: string; details?: DraftDetails }) =>
-    request('/api/imports', importDraftSchema, { method: 'POST', body }),
-  );
+/** Asked for by a loader: a draft is on the server before its page is drawn. */
+export const startImport = (body: { patternId?: string; details?: DraftDetails }) =>
+  request('/api/imports', importDraftSchema, { method: 'POST', body });
 
 export const useChangeImport = (draftId: string) =>
-  useDraftMutation((body: ImportPatch) =>
+  useDraftMutation(draftId, (body: ImportPatch) =>
     request(`/api/imports/${draftId}`, importDraftSchema, { method: 'PATCH', body }),
   );
 
 export const useUploadTable = (draftId: string) =>
-  useDraftMutation(({ role, file }: { role: TableRole; file: File }) => {
+  useDraftMutation(draftId, ({ role, file }: { role: TableRole; file: File }) => {
     const body = new FormData();
     body.append('file', file);
     return request(`/api/imports/${draftId}/tables/${role}`, importDraftSchema, { method: 'PUT', body });
   });
 
 export const useRemoveTable = (draftId: string) =>
-  useDraftMutation((role: TableRole) =>
+  useDraftMutation(draftId, (role: TableRole) =>
     request(`/api/imports/${draftId}/tables/${role}`, importDraftSchema, { method: 'DELETE' }),
   );
 
-export const useCommitImport = (draftId: string) =>
-  usePatternMutation(() =>
-    request(`/api/imports/${draftId}/commit`, z.object({ patternId: z.uuid(), revisionId: z.uuid() }), {
-      method: 'POST',
-    }),
-  );
+/** The draft itself stays in the cache until its page is left: asking for it again would find nothing. */
+export function useCommitImport(draftId: string) {
+  const client = useQueryClient();
+  const answer = z.object({ patternId: z.uuid(), revisionId: z.uuid() });
+  return useMutation({
+    scope: { id: `import ${draftId}` },
+    mutationFn: () => request(`/api/imports/${draftId}/commit`, answer, { method: 'POST' }),
+    onSuccess: () => {
+      client.removeQueries({ queryKey: ['imports', 'list'] });
+      client.removeQueries({ queryKey: ['patterns'] });
+    },
+  });
+}
 
 export function useDiscardImport() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (draftId: string) => requestNothing(`/api/imports/${draftId}`, { method: 'DELETE' }),
-    onSuccess: () => client.invalidateQueries({ queryKey: ['imports'] }),
+    onSuccess: () => client.invalidateQueries({ queryKey: ['imports', 'list'] }),
   });
 }

@@ -1,0 +1,1 @@
+export function lockFolder(folder: string, purpose: string): Promise<{ release: () => Promise<void> } | null>;

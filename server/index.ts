@@ -1,0 +1,104 @@
+import { createServer, type RequestListener, type Server } from 'node:http';
+import { join } from 'node:path';
+import type { RequestHandler } from 'express';
+import { pino } from 'pino';
+import { createApp } from './app.ts';
+import { createAuth } from './auth.ts';
+import { ConfigError, type Config } from './config.ts';
+import { createDatabase } from './db/client.ts';
+import { migrate } from './db/migrate.ts';
+
+export { ConfigError, readConfig } from './config.ts';
+
+const FINISH_MS = 8_000;
+
+interface DemoSignIn {
+  name: string;
+  email: string;
+  password: string;
+  role: string;
+}
+
+interface ServeOptions {
+  /** The project's folder. */
+  root: string;
+  /** Vite in the same process instead of the built client. */
+  isDevelopment: boolean;
+}
+
+export interface Served {
+  url: string;
+  /** The demo's accounts; none where other people can reach this instance. */
+  signIns: DemoSignIn[];
+  /** Finishes the requests under way, then closes the database's connections. */
+  stop: () => Promise<void>;
+}
+
+/** Migrates and listens; whoever calls it has parsed the configuration. Throws `ConfigError`. */
+export async function serve(config: Config, { root, isDevelopment }: ServeOptions): Promise<Served> {
+  const log = pino({ base: null });
+  const database = createDatabase(config.databaseUrl);
+  try {
+    await migrate(database);
+    const { db } = database;
+    const auth = createAuth({ db, config, log });
+    const signIns: DemoSignIn[] = [];
+    let app: RequestListener | null = null;
+    const server = createServer((request, response) => app?.(request, response));
+    const development = isDevelopment ? await startVite(root, server) : null;
+    const client = development ?? { folder: join(root, 'dist/client') };
+    app = createApp({ db, auth, log, config, client });
+    await listen(server, config);
+    return {
+      url: config.appUrl,
+      signIns,
+      async stop() {
+        await development?.close();
+        await finish(server);
+        await database.close();
+      },
+    };
+  } catch (error) {
+    await database.close();
+    throw error;
+  }
+}
+
+function listen(server: Server, { host, port }: Config): Promise<void> {
+  return new Promise((resolve, reject) => {
+    server.once('error', (error: NodeJS.ErrnoException) => {
+      reject(new ConfigError(sayListenError(error, host, port)));
+    });
+    server.listen(port, host, resolve);
+  });
+}
+
+function sayListenError(error: NodeJS.ErrnoException, host: string, port: number): string {
+  if (error.code === 'EADDRINUSE') return `PORT ${port} is taken by another program: set PORT to a free one.`;
+  if (error.code === 'EACCES')
+    return `PORT ${port} may not be used by this user: set PORT to one above 1023.`;
+  return `HOST ${host} cannot be listened on (${error.code ?? error.message}).`;
+}
+
+/** Takes no new requests; those that hang are cut off after a while. */
+function finish(server: Server): Promise<void> {
+  return new Promise((resolve) => {
+    const late = setTimeout(() => server.closeAllConnections(), FINISH_MS);
+    server.close(() => {
+      clearTimeout(late);
+      resolve();
+    });
+    server.closeIdleConnections();
+  });
+}
+
+async function startVite(root: string, server: Server) {
+  const { createServer: createVite } = await import('vite');
+  const vite = await createVite({
+    root,
+    appType: 'spa',
+    clearScreen: false,
+    server: { middlewareMode: true, ws: { server } },
+  });
+  return { middleware: vite.middlewares as RequestHandler, close: () => vite.close() };
+}

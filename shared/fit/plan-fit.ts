@@ -1,0 +1,168 @@
+import { blendsOf } from './blends.ts';
+import {
+  blendCautions,
+  endCautions,
+  passCautions,
+  pointCautions,
+  refusals,
+  tableCautions,
+} from './cautions.ts';
+import { checkInput, checkPositions } from './check-input.ts';
+import { TIE } from './constants.ts';
+import type { Caution, FitInput, FitOption, FitPlan, PointResult, ZonePlan } from './fit.schema.ts';
+import type { ZoneId } from './fit-words.ts';
+import { governors, idOf, pointCost } from './governors.ts';
+import { pointResults, sizeChoice } from './point-results.ts';
+import { reasonsFor } from './reasons.ts';
+import { reckon } from './reckoning.ts';
+import type { ReckonedPoint, Reckoning } from './reckoning.ts';
+import { chooseZones, joinCost, zoneCosts } from './zone-choice.ts';
+import type { ZoneChoice, ZoneCosts } from './zone-choice.ts';
+
+/** The version of the engine, kept beside every answer. */
+export const ENGINE_VERSION = '1.0.0';
+
+/**
+ * Plans which size to cut where: the best single size and the best blend, cheapest first, and the plan is the cheapest.
+ * All lengths in mm. Misuse (no size, a negative length, a size held beyond the pattern's) throws a RangeError that
+ * names the field; what is missing or not reckoned yet is answered as `notEnough` with its cautions.
+ */
+export function planFit(input: FitInput): FitPlan {
+  checkInput(input);
+  const refused = refusals(input);
+  if (refused.length > 0) return notEnough(refused);
+  const reckoning = reckon(input);
+  const cautions = tableCautions(reckoning);
+  if (!reckoning.points.some((point) => point.chooses)) return notEnough(cautions);
+  const zones = zoneCosts(reckoning);
+  const drafts = draftOptions(reckoning, zones, input.held);
+  const best = drafts[0];
+  if (!best) return notEnough(cautions);
+  const options = drafts.map((draft) => tellOption(input, reckoning, draft));
+  const { zones: planned = [], points = [], blends = [] } = options[0] ?? {};
+  const ends = endCautions(input, reckoning);
+  const { positions, governing } = best;
+  return {
+    status: ends.isOutOfRange ? 'outOfRange' : 'planned',
+    zones: planned,
+    points,
+    options,
+    blends,
+    alterations: [],
+    certainty: null,
+    reasons: reasonsFor(input, reckoning, zones, positions, governing),
+    cautions: [
+      ...cautions,
+      ...ends.cautions,
+      ...pointCautions(reckoning, positions),
+      ...passCautions(input, reckoning, positions),
+      ...blendCautions(blends),
+    ],
+  };
+}
+
+/**
+ * Every point at the sizes held by hand, from neck to hem: a whole position (0 is the first size) for each zone; a zone
+ * without one is left out. Positions beyond the sizes throw a RangeError; what `planFit` refuses gives no points.
+ */
+export function evaluateAt(input: FitInput, positions: Partial<Record<ZoneId, number>>): PointResult[] {
+  checkInput(input);
+  checkPositions('positions', positions, input.sizes.length, true);
+  if (refusals(input).length > 0) return [];
+  const reckoning = reckon(input);
+  return pointResults(
+    input,
+    reckoning,
+    reckoning.garment.zones.map((zone) => positions[zone]),
+  );
+}
+
+/** Every point at every size, in grade order: one table a size. Bad input throws as in `planFit`; what it refuses is empty. */
+export function easeProfile(input: FitInput): PointResult[][] {
+  checkInput(input);
+  if (refusals(input).length > 0) return input.sizes.map(() => []);
+  const reckoning = reckon(input);
+  return input.sizes.map((_, position) =>
+    pointResults(
+      input,
+      reckoning,
+      reckoning.garment.zones.map(() => position),
+    ),
+  );
+}
+
+function notEnough(cautions: Caution[]): FitPlan {
+  return {
+    status: 'notEnough',
+    zones: [],
+    points: [],
+    options: [],
+    blends: [],
+    alterations: [],
+    certainty: null,
+    reasons: [],
+    cautions,
+  };
+}
+
+/** An option before it is told: sizes by the garment's zone order. */
+interface Draft {
+  kind: 'oneSize' | 'blend';
+  positions: number[];
+  governing: (ReckonedPoint | null)[];
+  cost: number;
+}
+
+function draftOptions(reckoning: Reckoning, zones: ZoneCosts, held: FitInput['held']): Draft[] {
+  const { oneSize, blend } = chooseZones(reckoning, zones, held);
+  const draft = (kind: Draft['kind'], { positions }: ZoneChoice): Draft => ({
+    kind,
+    positions,
+    governing: governors(reckoning, zones, positions),
+    cost: costOf(reckoning, positions),
+  });
+  if (!oneSize) return blend ? [draft('blend', blend)] : [];
+  const single = draft('oneSize', oneSize);
+  // A blend that brings no point nearer is no advice.
+  if (!blend || pointsCost(reckoning, blend.positions) >= single.cost - TIE) return [single];
+  const blended = draft('blend', blend);
+  return blend.cost < oneSize.cost - TIE ? [blended, single] : [single, blended];
+}
+
+function tellOption(input: FitInput, reckoning: Reckoning, draft: Draft): FitOption {
+  const { kind, positions, governing, cost } = draft;
+  const zones: ZonePlan[] = [];
+  for (const zoneAt of reckoning.garment.shown) {
+    const zone = reckoning.garment.zones[zoneAt];
+    if (zone === undefined) continue;
+    zones.push({
+      zone,
+      size: sizeChoice(input, positions[zoneAt] ?? 0),
+      governedBy: idOf(governing[zoneAt]),
+    });
+  }
+  return {
+    kind,
+    zones,
+    points: pointResults(input, reckoning, positions),
+    alterations: [],
+    blends: blendsOf(input, reckoning, positions, governing),
+    cost,
+  };
+}
+
+function pointsCost(reckoning: Reckoning, positions: readonly number[]): number {
+  let cost = 0;
+  for (const point of reckoning.points)
+    cost += pointCost(reckoning, point, positions[point.spec.zoneAt] ?? 0);
+  return cost;
+}
+
+function costOf(reckoning: Reckoning, positions: readonly number[]): number {
+  const { parents } = reckoning.garment;
+  let cost = pointsCost(reckoning, positions);
+  for (let zone = 1; zone < positions.length; zone++) {
+    cost += joinCost(Math.abs((positions[zone] ?? 0) - (positions[parents[zone] ?? 0] ?? 0)));
+  }
+  return cost;
+}

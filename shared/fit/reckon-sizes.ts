@@ -1,0 +1,80 @@
+import { MEASURES } from '../points/measures.ts';
+import {
+  FLOOR_SHARE_OF_BODY,
+  STEP_LEAST_TAPE_ERRORS,
+  STEP_ONE_SIZE_GIRTH_MM,
+  STEP_ONE_SIZE_WIDTH_MM,
+  WEIGHT_FLOOR,
+} from './constants.ts';
+import type { FitInput } from './fit.schema.ts';
+import type { ReckonedPoint, Reckoning } from './reckoning.ts';
+
+/** Fills in deviation, step, half-width, floor and costs of a point at every size; its columns must have been read. */
+export function reckonSizes(input: FitInput, reckoning: Reckoning, point: ReckonedPoint): void {
+  const { chartLow, chartHigh, finished, sizes } = reckoning;
+  const { spec, at, bodyMm, chooses, case: found } = point;
+  const { wearingMm, targetMm, weight } = spec;
+  const isSewn = found === 'finished' || found === 'noTarget';
+  const hasDraft = found === 'both';
+  const isLoose = spec.role === 'loose';
+  const floorActs = (chooses || found === 'noTarget') && spec.floorBinds;
+  const wanted = bodyMm + (input.preferenceMm?.[spec.point] ?? 0);
+  // Rigid cloth carries a draft's smaller ease only where the draft did not count on stretch, and a chart that falls
+  // says nothing of the draft. Where a table has no value, NaN runs through every figure that would need it.
+  const carriesDraft =
+    found !== 'falls' && (input.garment.draftedStretch ?? 0) <= (input.fabric.stretch ?? 0);
+  const leastStep = leastStepMm(point, sizes);
+  let before = NaN;
+  let here = sizeMm(reckoning, at, isSewn);
+  for (let s = 0; s < sizes; s++) {
+    const i = at + s;
+    const low = chartLow[i] as number;
+    const high = chartHigh[i] as number;
+    const sewn = finished[i] as number;
+    const next = s + 1 < sizes ? sizeMm(reckoning, i + 1, isSewn) : NaN;
+    const outside = wanted > high ? wanted - high : wanted < low ? wanted - low : 0;
+    const deviation = !chooses ? NaN : isSewn ? wanted + targetMm - sewn : outside;
+    const isDown = s === sizes - 1 || (deviation < 0 && s > 0);
+    const gap = isDown ? here - before : next - here;
+    const step = gap > leastStep ? gap : leastStep;
+    // Not below what the drafter meant for the largest body of the size.
+    const floor = carriesDraft && sewn - high < wearingMm ? sewn - high : wearingMm;
+    const half = halfWidth(step, hasDraft ? sewn - here : isSewn ? targetMm : NaN, floor, bodyMm);
+    const share = deviation / half;
+    const missing = (floor - sewn + bodyMm) / step;
+    reckoning.deviation[i] = deviation;
+    reckoning.step[i] = step;
+    reckoning.half[i] = half;
+    reckoning.floor[i] = spec.floorBinds ? floor : NaN;
+    reckoning.deviationCost[i] = !chooses ? 0 : isLoose ? looseCost(weight, share) : weight * share * share;
+    reckoning.floorCost[i] = floorActs && missing > 0 ? WEIGHT_FLOOR * missing * missing : 0;
+    before = here;
+    here = next;
+  }
+}
+
+/** What stands for a size: the middle of its chart's range, or the sewn garment, in mm. */
+function sizeMm(reckoning: Reckoning, i: number, isSewn: boolean): number {
+  if (isSewn) return reckoning.finished[i] as number;
+  return ((reckoning.chartLow[i] as number) + (reckoning.chartHigh[i] as number)) / 2;
+}
+
+/** What tapes can tell apart; with one size, which has no neighbour, a usual grade. */
+function leastStepMm({ spec }: ReckonedPoint, sizes: number): number {
+  if (sizes > 1) return STEP_LEAST_TAPE_ERRORS * MEASURES[spec.point].tapeErrorMm;
+  return spec.measure === 'girth' ? STEP_ONE_SIZE_GIRTH_MM : STEP_ONE_SIZE_WIDTH_MM;
+}
+
+/** Half of "as drafted": half a size, or half the leeway the draft has, whichever is larger. */
+function halfWidth(step: number, target: number, floor: number, bodyMm: number): number {
+  const least = FLOOR_SHARE_OF_BODY * bodyMm;
+  // Where the handbook has no floor the body itself is one: rigid cloth closes round no less.
+  const counted = floor > least ? floor : floor <= least ? least : 0;
+  const room = target - counted;
+  return (room > step ? room : step) / 2;
+}
+
+function looseCost(weight: number, share: number): number {
+  const beyond = (share < 0 ? -share : share) - 1;
+  return beyond > 0 ? weight * beyond * beyond : 0;
+}

@@ -1,0 +1,105 @@
+import {
+  Area,
+  CartesianGrid,
+  ComposedChart,
+  Line,
+  ReferenceDot,
+  ReferenceLine,
+  ResponsiveContainer,
+  XAxis,
+  YAxis,
+} from 'recharts';
+import type { PointResult } from '../../../shared/fit/fit.schema.ts';
+import { printLength } from '../../../shared/units.ts';
+import type { SayContext } from '../../../shared/fit/say-words.ts';
+
+interface EaseProfileProps {
+  result: PointResult;
+  ladder: readonly (number | null)[];
+  context: SayContext;
+}
+
+const TICK = { fontSize: 13, fill: 'var(--ink-2)' };
+
+/** One point's ease in every size: the cloth's dashed line over the body's solid one, the room between them filled. */
+export function EaseProfile({ result, ladder, context }: EaseProfileProps) {
+  const { floorMm, size } = result;
+  const isCalm = window.matchMedia('(prefers-reduced-motion: reduce)').matches;
+  const data = ladder.map((mm, position) => ({
+    size: context.sizes[position] ?? '',
+    mm,
+    room: mm === null || mm < (floorMm ?? 0) ? null : [floorMm ?? 0, mm],
+  }));
+  const chosen = ladder[size.position] ?? null;
+  const label = (value: string, fill = 'var(--ink)') => ({
+    value,
+    position: 'insideBottomRight' as const,
+    fontSize: 13,
+    fill,
+  });
+  return (
+    <ResponsiveContainer width="100%" height={300}>
+      <ComposedChart
+        data={data}
+        margin={{ top: 22, right: 12, bottom: 4, left: 0 }}
+        accessibilityLayer={false}
+      >
+        <CartesianGrid vertical={false} stroke="var(--rule)" />
+        <XAxis
+          dataKey="size"
+          tick={TICK}
+          tickLine={false}
+          axisLine={false}
+          interval="preserveStartEnd"
+          minTickGap={14}
+        />
+        <YAxis
+          width={52}
+          tick={TICK}
+          tickLine={false}
+          axisLine={false}
+          tickFormatter={(mm: number) => printLength(mm, context.unit, { signed: true }).replace(/\.0$/, '')}
+        />
+        <Area
+          dataKey="room"
+          fill="var(--woad-tint)"
+          stroke="none"
+          fillOpacity={1}
+          isAnimationActive={!isCalm}
+        />
+        <ReferenceLine y={0} stroke="var(--ink)" strokeWidth={2.5} label={label('body')} />
+        {floorMm !== null && (
+          <ReferenceLine
+            y={floorMm}
+            stroke="var(--ink-2)"
+            strokeWidth={1.5}
+            label={label('wearing ease', 'var(--ink-2)')}
+          />
+        )}
+        <Line
+          dataKey="mm"
+          stroke="var(--woad)"
+          strokeWidth={2.5}
+          strokeDasharray="8 5"
+          dot={
+            data.length <= 30
+              ? { r: 2.5, fill: 'var(--paper)', stroke: 'var(--woad)', strokeDasharray: '0' }
+              : false
+          }
+          isAnimationActive={!isCalm}
+        />
+        {chosen !== null && (
+          <ReferenceDot
+            x={size.label}
+            y={chosen}
+            r={7}
+            fill="var(--paper)"
+            stroke="var(--woad)"
+            strokeWidth={2.5}
+            label={{ value: size.label, position: 'top', fontSize: 14, fontWeight: 700, fill: 'var(--ink)' }}
+          />
+        )}
+      </ComposedChart>
+    </ResponsiveContainer>
+  );
+}

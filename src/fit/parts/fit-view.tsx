@@ -1,0 +1,102 @@
+import type { ReactNode } from 'react';
+import type { FitPlan } from '../../../shared/fit/fit.schema.ts';
+import { sayPlan, sayZones } from '../../../shared/fit/say-plan.ts';
+import { listWords, sayZone } from '../../../shared/fit/say-words.ts';
+import { Watch } from './answer.tsx';
+import { BeforeCutting, Cutting, Options } from './beside.tsx';
+import { FitTable } from './fit-table.tsx';
+import type { Ground, Held } from './fitting.ts';
+import { Instrument } from './instrument.tsx';
+import { Legend } from './legend.tsx';
+
+interface FitViewProps {
+  ground: Ground;
+  plan: FitPlan;
+  held: Held;
+  /** Left out where a plan is only looked at. */
+  onHeld?: (held: Held) => void;
+  /** The answer is the page's heading, or stands under one. */
+  headingLevel: 1 | 2;
+  /** The answer names the document too. */
+  isPage?: boolean;
+  /** Between what is said and what is drawn: saving, for example. */
+  actions?: ReactNode;
+}
+
+/** The whole answer: the sentence, what to watch, the instrument, and what to do at the table. */
+export function FitView({ ground, plan, held, onHeld, headingLevel, isPage = false, actions }: FitViewProps) {
+  const { context } = ground;
+  const answer = sayPlan(plan, context);
+  const Heading = headingLevel === 1 ? 'h1' : 'h2';
+  const isHeld = Object.keys(held).length > 0;
+  return (
+    <>
+      {isPage && <title>{`${answer.replace(/[.]$/, '')} · Leeway`}</title>}
+      <Heading
+        tabIndex={-1}
+        aria-live="polite"
+        className="mt-3 max-w-[21em] text-answer font-bold tracking-[-0.02em] break-words outline-none"
+      >
+        {answer}
+      </Heading>
+      <Watch plan={plan} context={context} />
+      {onHeld && isHeld && <BackToPlan ground={ground} held={held} onBack={() => onHeld({})} />}
+      {actions}
+      {plan.zones.length > 0 && (
+        <>
+          <section aria-label="The instrument" className="mt-7">
+            <Instrument
+              ground={ground}
+              plan={plan}
+              held={held}
+              {...(onHeld && {
+                onHold: (zone, position) => onHeld({ ...held, [zone]: position }),
+                onRelease: (zone) =>
+                  onHeld(Object.fromEntries(Object.entries(held).filter(([each]) => each !== zone))),
+              })}
+            />
+          </section>
+          <Legend canChange={onHeld !== undefined} />
+          <details className="mt-4 print:hidden">
+            <summary className="inline-flex min-h-11 list-none items-center font-semibold text-woad [&::-webkit-details-marker]:hidden">
+              <span className="changeable leading-tight">The same as a table</span>
+            </summary>
+            <FitTable plan={plan} held={held} context={context} />
+          </details>
+          <div className="mt-10 grid gap-x-14 gap-y-10 lg:grid-cols-3">
+            <Cutting plan={plan} context={context} />
+            <Options
+              options={ground.plan.options}
+              plan={plan}
+              context={context}
+              {...(onHeld && { onTake: onHeld })}
+            />
+            <BeforeCutting plan={plan} context={context} />
+          </div>
+        </>
+      )}
+    </>
+  );
+}
+
+/** What is held, and the one click that lets go of it all. */
+function BackToPlan({ ground, held, onBack }: { ground: Ground; held: Held; onBack: () => void }) {
+  const { context, plan } = ground;
+  const words = Object.entries(held).map(
+    ([zone, position]) =>
+      `${sayZone(zone as keyof Held, context.chestWord)} ${context.sizes[position] ?? ''}`,
+  );
+  return (
+    <p className="mt-5 flex flex-wrap items-center gap-x-4 border-l-2 border-woad pl-4 print:hidden">
+      <span>You hold the {listWords(words)}.</span>
+      <button
+        type="button"
+        className="inline-flex min-h-11 items-center font-semibold text-woad"
+        onClick={onBack}
+      >
+        <span className="changeable leading-tight">Back to the plan</span>
+      </button>
+      <span className="text-ink-2">{sayZones(plan.zones, context)}</span>
+    </p>
+  );
+}

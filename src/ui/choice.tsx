@@ -1,0 +1,77 @@
+import { useId, type ComponentProps, type ReactNode } from 'react';
+import { FieldError } from './field.tsx';
+
+interface Choice {
+  value: string;
+  label: ReactNode;
+  hint?: ReactNode;
+}
+
+type RadioGroupProps = Omit<ComponentProps<'input'>, 'type' | 'value'> & {
+  label: ReactNode;
+  hint?: ReactNode;
+  error?: string | undefined;
+  choices: readonly Choice[];
+  /** For a group that its page holds; one of a form library brings its own. */
+  value?: string;
+};
+
+const MARK = 'size-5 shrink-0 accent-woad';
+
+/** One of a few, all in sight. The rest of its properties go to every radio, a form library's among them. */
+export function RadioGroup({ label, hint, error, choices, value, className, ...input }: RadioGroupProps) {
+  const id = useId();
+  return (
+    <fieldset
+      aria-describedby={[
+        hint === undefined ? '' : `${id}-hint`,
+        error === undefined ? '' : `${id}-error`,
+      ].join(' ')}
+      className={className}
+    >
+      <legend className="text-note font-semibold">{label}</legend>
+      {hint !== undefined && (
+        <p id={`${id}-hint`} className="text-small text-ink-2">
+          {hint}
+        </p>
+      )}
+      <div className="flex flex-wrap gap-x-7">
+        {choices.map((choice) => (
+          <label key={choice.value} className="flex min-h-11 items-center gap-2.5">
+            <input
+              type="radio"
+              {...input}
+              value={choice.value}
+              {...(value === undefined ? {} : { checked: value === choice.value })}
+              className={MARK}
+            />
+            <span>
+              {choice.label}
+              {choice.hint !== undefined && (
+                <span className="block text-small text-ink-2">{choice.hint}</span>
+              )}
+            </span>
+          </label>
+        ))}
+      </div>
+      <FieldError fieldId={id} error={error} />
+    </fieldset>
+  );
+}
+
+/** Yes or no. */
+export function Checkbox({
+  label,
+  hint,
+  ...input
+}: ComponentProps<'input'> & { label: ReactNode; hint?: ReactNode }) {
+  return (
+    <label className="flex min-h-11 items-center gap-2.5">
+      <input {...input} type="checkbox" className={MARK} />
+      <span>
+        {label}
+        {hint !== undefined && <span className="block text-small text-ink-2">{hint}</span>}
+      </span>
+    </label>
+  );
+}

@@ -1,0 +1,18 @@
+// `npm run bench [name …]`: one JSON line a figure.
+import type { Figure } from './figure.ts';
+import { run as frontPage } from './front-page.ts';
+import { run as planFit } from './plan-fit.ts';
+import { run as start } from './start.ts';
+
+const benches: Record<string, () => Promise<Figure[]>> = {
+  'plan-fit': planFit,
+  'front-page': frontPage,
+  start,
+};
+const wanted = process.argv.slice(2);
+
+for (const [name, run] of Object.entries(benches)) {
+  if (wanted.length > 0 && !wanted.includes(name)) continue;
+  for (const figure of await run()) console.log(JSON.stringify(figure));
+}
+process.exit(0);

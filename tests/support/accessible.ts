@@ -1,0 +1,19 @@
+import { AxeBuilder } from '@axe-core/playwright';
+import type { Page } from 'playwright-core';
+import { expect } from 'vitest';
+
+const RULES = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'];
+
+/** What an automatic check finds against WCAG 2.2 AA, in both colour schemes: nothing. */
+export async function expectAccessible(page: Page): Promise<void> {
+  for (const colorScheme of ['light', 'dark'] as const) {
+    await page.emulateMedia({ colorScheme });
+    const { violations } = await new AxeBuilder({ page }).withTags(RULES).analyze();
+    const found = violations.map(({ id, help, nodes }) => ({
+      id,
+      help,
+      at: nodes.map((node) => `${node.target.join(' ')}: ${node.failureSummary ?? ''}`),
+    }));
+    expect(found, `${page.url()} in ${colorScheme}`).toEqual([]);
+  }
+}

@@ -1,0 +1,99 @@
+import type { APIRequestContext } from 'playwright-core';
+import { z } from 'zod';
+import { paths } from '../../src/paths.ts';
+
+export interface DrawnPage {
+  name: string;
+  path: string;
+  /** Drawn for somebody signed out. */
+  isPublic: boolean;
+}
+
+const one = z.object({ id: z.uuid() });
+const many = z.object({ items: z.array(one).min(1) });
+const revisionsSchema = z.object({ items: z.array(one.extend({ number: z.number() })).min(1) });
+
+/** A chart with one cell that cannot be read, so that the page shows both what was understood and what was not. */
+const CHART = 'Size,Bust (cm),Waist (cm),Hip (cm)\n10,84,64,90\n12,88,six,94\n14,92,72,98\n';
+
+/** Every page in src/paths.ts, found as the demo's member would find it; what the demo lacks is made. */
+export async function everyPage(request: APIRequestContext, baseURL: string): Promise<DrawnPage[]> {
+  const api = apiOf(request, baseURL);
+  const [person] = (await api.get('/api/people', many)).items;
+  const personId = person!.id;
+  const [set] = (await api.get(`/api/people/${personId}/measurement-sets`, many)).items;
+  const [pattern] = (await api.get('/api/patterns', many)).items;
+  const patternId = pattern!.id;
+  const [revision] = (await api.get(`/api/patterns/${patternId}/revisions`, revisionsSchema)).items;
+  const measurementSetId = set!.id;
+  const revisionId = revision!.id;
+  const draftId = await draft(api);
+  const plan = await api.post(
+    '/api/plans',
+    { name: 'Harbour dress', measurementSetId, revisionId, options: {} },
+    one,
+  );
+  const query = new URLSearchParams({ set: measurementSetId, revision: revisionId }).toString();
+
+  const open: [string, string][] = [
+    ['home', paths.home],
+    ['sign-in', paths.signIn],
+    ['sign-up', paths.signUp],
+    ['not-found', '/nothing-here'],
+  ];
+  const signedIn: [keyof typeof paths, string][] = [
+    ['people', paths.people],
+    ['newPerson', paths.newPerson],
+    ['person', paths.person(personId)],
+    ['editPerson', paths.editPerson(personId)],
+    ['measure', paths.measure(personId)],
+    ['measurementSet', paths.measurementSet(personId, measurementSetId)],
+    ['patterns', paths.patterns],
+    ['pattern', paths.pattern(patternId)],
+    ['editPattern', paths.editPattern(patternId)],
+    ['revision', paths.revision(patternId, revisionId)],
+    ['newImport', paths.newImport],
+    ['import', paths.import(draftId)],
+    ['fit', `${paths.fit}?${query}`],
+    ['plans', paths.plans],
+    ['plan', paths.plan(plan.id)],
+  ];
+  return [
+    ...open.map(([name, path]) => ({ name, path, isPublic: true })),
+    ...signedIn.map(([name, path]) => ({ name: kebab(name), path, isPublic: false })),
+  ];
+}
+
+/** The names of the addresses that `everyPage` must cover. */
+export const pageNames = (): string[] => Object.keys(paths).map(kebab);
+
+const kebab = (name: string) => name.replace(/[A-Z]/g, (letter) => `-${letter.toLowerCase()}`);
+
+type Api = ReturnType<typeof apiOf>;
+
+async function draft(api: Api): Promise<string> {
+  const { id } = await api.post('/api/imports', { details: { title: 'Linen tunic' } }, one);
+  const file = { name: 'tunic.csv', mimeType: 'text/csv', buffer: Buffer.from(CHART) };
+  await api.upload(`/api/imports/${id}/tables/chart`, { file });
+  return id;
+}
+
+function apiOf(request: APIRequestContext, baseURL: string) {
+  const headers = { origin: baseURL };
+  const read = async <T extends z.ZodType>(
+    response: Awaited<ReturnType<typeof request.get>>,
+    schema: T,
+  ): Promise<z.output<T>> => {
+    if (!response.ok()) throw new Error(`${response.url()}: ${await response.text()}`);
+    return schema.parse(await response.json());
+  };
+  type Multipart = NonNullable<Parameters<typeof request.put>[1]>['multipart'];
+  return {
+    get: async <T extends z.ZodType>(path: string, schema: T) =>
+      read(await request.get(baseURL + path), schema),
+    post: async <T extends z.ZodType>(path: string, data: unknown, schema: T) =>
+      read(await request.post(baseURL + path, { headers, data }), schema),
+    upload: async (path: string, multipart: NonNullable<Multipart>) =>
+      read(await request.put(baseURL + path, { headers, multipart }), one),
+  };
+}
