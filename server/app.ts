@@ -5,6 +5,7 @@ import { recognise } from './account/current-user.ts';
 import type { Auth } from './auth.ts';
 import type { Config } from './config.ts';
 import type { Db } from './db/client.ts';
+import { createFileStore } from './files/file-store.ts';
 import { fitRoutes } from './fit/fit.routes.ts';
 import { healthRoutes } from './health/health.routes.ts';
 import type { RouteDeps } from './http/deps.ts';
@@ -13,6 +14,11 @@ import { logRequests } from './http/log-requests.ts';
 import { checkOrigin } from './http/origin.ts';
 import { securityHeaders } from './http/security-headers.ts';
 import { serveClient } from './http/serve-client.ts';
+import { fileRoutes } from './patterns/files.routes.ts';
+import { importTableRoutes } from './patterns/import-tables.routes.ts';
+import { importRoutes } from './patterns/imports.routes.ts';
+import { patternRoutes } from './patterns/patterns.routes.ts';
+import { revisionRoutes } from './patterns/revisions.routes.ts';
 import { measurementSetRoutes } from './people/measurement-sets.routes.ts';
 import { peopleRoutes } from './people/people.routes.ts';
 import { planRoutes } from './plans/plans.routes.ts';
@@ -21,7 +27,7 @@ interface AppOptions {
   db: Db;
   auth: Auth;
   log: Logger;
-  config: Pick<Config, 'appUrl' | 'origins' | 'trustProxy'>;
+  config: Pick<Config, 'appUrl' | 'filesFolder' | 'origins' | 'trustProxy'>;
   /** Where the built browser code lies, or what serves it while it is being written; nothing: the API alone. */
   client?: { folder: string } | { middleware: RequestHandler };
 }
@@ -42,6 +48,9 @@ export function createApp({ db, auth, log, config, client }: AppOptions): Expres
   app.use(healthRoutes(deps), accountRoutes({ ...deps, auth }));
   app.use('/api', express.json({ limit: '1mb' }));
   app.use(peopleRoutes(deps), measurementSetRoutes(deps), fitRoutes(deps), planRoutes(deps));
+  const keeping = { ...deps, files: createFileStore(config.filesFolder) };
+  app.use(patternRoutes(keeping), revisionRoutes(deps), fileRoutes(keeping));
+  app.use(importRoutes(keeping), importTableRoutes(keeping));
   app.use('/api', noSuchAddress);
 
   if (isBeingWritten) app.use(client.middleware);

@@ -7,17 +7,14 @@ import { createAuth } from './auth.ts';
 import { ConfigError, type Config } from './config.ts';
 import { createDatabase } from './db/client.ts';
 import { migrate } from './db/migrate.ts';
+import { isDemoAccountKnown } from './demo/demo-accounts.ts';
+import { keptSignIns, type DemoSignIn } from './demo/kept-sign-ins.ts';
+import { seedDemo, type SeedDeps } from './demo/seed.ts';
+import { createFileStore } from './files/file-store.ts';
 
 export { ConfigError, readConfig } from './config.ts';
 
 const FINISH_MS = 8_000;
-
-interface DemoSignIn {
-  name: string;
-  email: string;
-  password: string;
-  role: string;
-}
 
 interface ServeOptions {
   /** The project's folder. */
@@ -42,7 +39,7 @@ export async function serve(config: Config, { root, isDevelopment }: ServeOption
     await migrate(database);
     const { db } = database;
     const auth = createAuth({ db, config, log });
-    const signIns: DemoSignIn[] = [];
+    const signIns = config.isDemo ? await demoSignIns(config, { db, auth, log }) : [];
     let app: RequestListener | null = null;
     const server = createServer((request, response) => app?.(request, response));
     const development = isDevelopment ? await startVite(root, server) : null;
@@ -62,6 +59,15 @@ export async function serve(config: Config, { root, isDevelopment }: ServeOption
     await database.close();
     throw error;
   }
+}
+
+function demoSignIns(config: Config, deps: Omit<SeedDeps, 'files'>): Promise<DemoSignIn[]> {
+  const files = createFileStore(config.filesFolder);
+  return keptSignIns(
+    config.dataFolder,
+    (signIn) => isDemoAccountKnown(deps.auth, signIn),
+    () => seedDemo({ ...deps, files }),
+  );
 }
 
 function listen(server: Server, { host, port }: Config): Promise<void> {

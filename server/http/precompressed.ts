@@ -20,9 +20,10 @@ export function precompressed(folder: string, maxAge: string): RequestHandler[] 
         ([encoding, suffix]) =>
           names.has(request.path + suffix) && request.acceptsEncodings(encoding) === encoding,
       );
+      response.vary('accept-encoding');
       if (found) {
         const [encoding, suffix] = found;
-        response.set({ 'content-encoding': encoding, vary: 'accept-encoding' });
+        response.set('content-encoding', encoding);
         request.url = request.path + suffix;
       }
       next();

@@ -1,6 +1,6 @@
 import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
-import express, { Router } from 'express';
+import express, { Router, type RequestHandler } from 'express';
 import { precompressed } from './precompressed.ts';
 import { nonceOf } from './security-headers.ts';
 
@@ -11,9 +11,7 @@ import { nonceOf } from './security-headers.ts';
 export function serveClient(folder: string): Router {
   const router = Router();
   const page = readFileSync(join(folder, 'index.html'), 'utf8');
-  router.use('/assets', precompressed(join(folder, 'assets'), '1y'), (_request, response) =>
-    response.status(404).type('text/plain').send('There is no such file.'),
-  );
+  router.use('/assets', precompressed(join(folder, 'assets'), '1y'), noSuchFile);
   router.use(express.static(folder, { index: false, redirect: false, maxAge: '1h' }));
   router.get('/{*path}', (request, response, next) => {
     if (request.accepts('html') === false || hasExtension(request.path)) {
@@ -28,6 +26,10 @@ export function serveClient(folder: string): Router {
   });
   return router;
 }
+
+const noSuchFile: RequestHandler = (_request, response) => {
+  response.status(404).type('text/plain').send('There is no such file.');
+};
 
 const hasExtension = (path: string): boolean => /\.[a-z0-9]{2,5}$/i.test(path);
 

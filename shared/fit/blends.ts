@@ -7,7 +7,8 @@ import type { ReckonedPoint, Reckoning } from './reckoning.ts';
 
 /**
  * Every crossing from one size to another as it is cut, from shoulder to hem: the change in girth against staying in
- * the first size, shared over the seam edges, over the length between the levels. None where all zones are alike.
+ * the first size, shared over the seam edges, over the length between the levels. None where all zones
+ * are alike; a crossing is left out where the pattern gives no point on either side of it.
  */
 export function blendsOf(
   input: FitInput,

@@ -31,10 +31,16 @@ export const STEP_ONE_SIZE_WIDTH_MM = 10;
 export const STEP_LEAST_TAPE_ERRORS = 2;
 
 /**
+ * A fitted neck, sleeve or width is altered rather than chosen by, so beyond so many half-sizes its vote grows only
+ * evenly: two neck sizes more never outweigh a chest on its own row. The chest rules the shoulder.
+ */
+export const ALTERED_BEYOND = 1;
+
+/**
  * Among sizes at which a loose point costs nothing, the nearest is wanted: weighed so lightly that no blend is ever
  * made for it, and left out of every cost that is told.
  */
-export const NEARNESS = 1e-4;
+export const NEARNESS = 1e-3;
 /** Costs closer than this are equal: the larger size is then taken, as is usual in a woven (common practice). */
 export const TIE = 1e-9;
 

@@ -18,6 +18,8 @@ export interface FitPoint {
   role: PointRole;
   weight: number;
   measure: MeasureKind;
+  /** Fitted, but altered rather than chosen by: neck, sleeve and widths. */
+  isAltered: boolean;
   wearingMm: number;
   targetMm: number;
   edges: number;
@@ -44,6 +46,7 @@ const WEIGHTS: Record<PointRole, number> = {
   fitted: WEIGHT_FITTED,
   loose: WEIGHT_LOOSE,
 };
+const LEAVES = new Set<ZoneId>(['neck', 'sleeve']);
 const OPEN_ZONES = new Set<ZoneId>(['bust', 'waist', 'hip']);
 
 // The handbook does not change while the program runs, so each combination is worked out once.
@@ -85,6 +88,7 @@ function makeGarment(
         role,
         weight: WEIGHTS[role],
         measure: MEASURES[point].kind,
+        isAltered: role === 'fitted' && (LEAVES.has(zone) || MEASURES[point].kind === 'width'),
         wearingMm: wearingEase(kind, point)?.lowMm ?? NaN,
         targetMm: target ? targetEaseMm(target) : NaN,
         edges: defaultSeamEdges(point, zone),

@@ -1,11 +1,13 @@
 import { MEASURES } from '../points/measures.ts';
 import {
+  ALTERED_BEYOND,
   FLOOR_SHARE_OF_BODY,
   STEP_LEAST_TAPE_ERRORS,
   STEP_ONE_SIZE_GIRTH_MM,
   STEP_ONE_SIZE_WIDTH_MM,
   WEIGHT_FLOOR,
 } from './constants.ts';
+import type { FitPoint } from './fit-garment.ts';
 import type { FitInput } from './fit.schema.ts';
 import type { ReckonedPoint, Reckoning } from './reckoning.ts';
 
@@ -13,10 +15,9 @@ import type { ReckonedPoint, Reckoning } from './reckoning.ts';
 export function reckonSizes(input: FitInput, reckoning: Reckoning, point: ReckonedPoint): void {
   const { chartLow, chartHigh, finished, sizes } = reckoning;
   const { spec, at, bodyMm, chooses, case: found } = point;
-  const { wearingMm, targetMm, weight } = spec;
+  const { wearingMm, targetMm } = spec;
   const isSewn = found === 'finished' || found === 'noTarget';
   const hasDraft = found === 'both';
-  const isLoose = spec.role === 'loose';
   const floorActs = (chooses || found === 'noTarget') && spec.floorBinds;
   const wanted = bodyMm + (input.preferenceMm?.[spec.point] ?? 0);
   // Rigid cloth carries a draft's smaller ease only where the draft did not count on stretch, and a chart that falls
@@ -46,7 +47,7 @@ export function reckonSizes(input: FitInput, reckoning: Reckoning, point: Reckon
     reckoning.step[i] = step;
     reckoning.half[i] = half;
     reckoning.floor[i] = spec.floorBinds ? floor : NaN;
-    reckoning.deviationCost[i] = !chooses ? 0 : isLoose ? looseCost(weight, share) : weight * share * share;
+    reckoning.deviationCost[i] = chooses ? deviationCost(spec, share) : 0;
     reckoning.floorCost[i] = floorActs && missing > 0 ? WEIGHT_FLOOR * missing * missing : 0;
     before = here;
     here = next;
@@ -74,7 +75,11 @@ function halfWidth(step: number, target: number, floor: number, bodyMm: number):
   return (room > step ? room : step) / 2;
 }
 
-function looseCost(weight: number, share: number): number {
-  const beyond = (share < 0 ? -share : share) - 1;
-  return beyond > 0 ? weight * beyond * beyond : 0;
+/** What a deviation of so many half-widths costs. */
+function deviationCost({ role, weight, isAltered }: FitPoint, share: number): number {
+  const size = share < 0 ? -share : share;
+  if (role === 'loose') return size > 1 ? weight * (size - 1) * (size - 1) : 0;
+  if (!isAltered || size <= ALTERED_BEYOND) return weight * size * size;
+  // Goes on as a straight line where the square stops, without a corner.
+  return weight * ALTERED_BEYOND * (2 * size - ALTERED_BEYOND);
 }

@@ -65,13 +65,9 @@ const SENTENCES: Record<CautionCode, Entry> = {
   belowFloor: {
     tone: 'watch',
     say: (cautions, context) =>
-      `${capital(
-        each(cautions, context, (name, amount) =>
-          amount === null
-            ? `the ${name} has less than wearing ease`
-            : `the ${name} has ${amount} less than wearing ease`,
-        ),
-      )}.`,
+      cautions.length === 1
+        ? `${capital(each(cautions, context, (name, amount) => `the ${name} has ${amount === null ? '' : `${amount} `}less than wearing ease`))}.`
+        : `Less than wearing ease: ${each(cautions, context, (name, amount) => (amount === null ? name : `${name} by ${amount}`))}.`,
   },
   notMeasured: {
     tone: 'missing',
@@ -145,16 +141,20 @@ export function sayBorderline(points: readonly PointResult[], context: SayContex
   if (close.length === 0) return null;
   const nearest = [...close].sort((a, b) => Math.abs(a.leewayMm ?? 0) - Math.abs(b.leewayMm ?? 0));
   const named = listWords(nearest.slice(0, 3).map((result) => sayPoint(result.point, context.chestWord)));
-  const leeway = nearest[0]?.leewayMm ?? null;
-  const amount =
-    leeway === null
-      ? ''
-      : `: ${printLengthWithUnit(Math.abs(leeway), context.unit)} of leeway is about what a tape can be out`;
   return {
     code: 'borderline',
     tone: 'missing',
-    words: `Measure the ${named} again first${nearest.length === 1 ? amount : ': so little leeway is about what a tape can be out'}.`,
+    words: `Measure the ${named} again first: ${sayTape(nearest, context)}.`,
   };
+}
+
+function sayTape(close: readonly PointResult[], context: SayContext): string {
+  const leewayMm = close.length === 1 ? (close[0]?.leewayMm ?? null) : null;
+  if (leewayMm === null) return 'it lies so near wearing ease that the tape alone could decide';
+  const amount = printLengthWithUnit(Math.abs(leewayMm), context.unit);
+  return leewayMm < 0
+    ? `${amount} is no more than a tape can be out`
+    : `${amount} of leeway is no more than a tape can be out`;
 }
 
 /** Everything to say under the answer, the weightiest first; sentences that the answer itself has said are left out. */

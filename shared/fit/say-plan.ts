@@ -1,7 +1,7 @@
 import { printLengthWithUnit } from '../units.ts';
 import type { Caution, FitPlan, ZonePlan } from './fit.schema.ts';
-import { ZONE_IDS, type ZoneId } from './fit-words.ts';
-import { capital, listWords, sayPoint, sayZone, type SayContext } from './say-words.ts';
+import { ZONE_IDS, type Verdict, type ZoneId } from './fit-words.ts';
+import { listWords, sayPoint, sayVerdict, sayZone, type SayContext } from './say-words.ts';
 
 /** Zones that leave the trunk of a garment instead of continuing down it. */
 const BRANCHES: readonly ZoneId[] = ['neck', 'sleeve'];
@@ -140,19 +140,23 @@ function sayNotEnough(plan: FitPlan, context: SayContext): string {
   }.`;
 }
 
-/** One zone's choice as a screen reader should say it: `16, hip: ease 6.0 cm, as drafted`. */
-export function sayNode(
-  choice: { label: string; zone: ZoneId; easeMm: number | null; verdict: string },
-  context: SayContext,
-): string {
-  const ease =
-    choice.easeMm === null
-      ? 'ease not published'
-      : `ease ${printLengthWithUnit(choice.easeMm, context.unit)}`;
-  return `${choice.label}, ${sayZone(choice.zone, context.chestWord)}: ${ease}, ${choice.verdict}`;
+/** What a zone's node stands for. */
+export interface NodeChoice {
+  label: string;
+  zone: ZoneId;
+  /** Null where the zone has nothing to compare. */
+  result: { easeMm: number | null; verdict: Verdict; leewayMm: number | null } | null;
+  isHeld: boolean;
 }
 
-/** A zone's word as a heading. */
-export function zoneHeading(zone: ZoneId, chestWord: SayContext['chestWord']): string {
-  return capital(sayZone(zone, chestWord));
+/** One zone's choice as a screen reader should say it: `16, hip: ease 6.0 cm, as drafted`. */
+export function sayNode({ label, zone, result, isHeld }: NodeChoice, context: SayContext): string {
+  const held = isHeld ? ', held' : '';
+  const start = `${label}, ${sayZone(zone, context.chestWord)}`;
+  if (!result) return `${start}: nothing to compare${held}`;
+  const ease =
+    result.easeMm === null
+      ? 'ease not published'
+      : `ease ${printLengthWithUnit(result.easeMm, context.unit)}`;
+  return `${start}: ${ease}, ${sayVerdict(result)}${held}`;
 }

@@ -26,7 +26,7 @@ const SENTENCES: Record<ReasonCode, Sentence> = {
   governs: (reasons, _plan, context) => `Decided by ${points(reasons, context)}.`,
   followsNeighbour: (reasons, _plan, context) => {
     const zones = unique(reasons.flatMap(({ zone }) => (zone ? [sayZone(zone, context.chestWord)] : [])));
-    return `${capital(listWords(zones))}: no measured point there, so ${zones.length === 1 ? 'it follows its neighbour' : 'they follow their neighbours'}.`;
+    return `${capital(listWords(zones))}: nothing there chooses a size, so ${zones.length === 1 ? 'it follows its neighbour' : 'they follow their neighbours'}.`;
   },
 };
 

@@ -18,6 +18,16 @@ export const VERDICT_WORDS: Record<Verdict, string> = {
   unknown: 'cannot be said',
 };
 
+/**
+ * One point's verdict in words. Where the draft is not known but the floor is, wearing ease can still be said. Empty
+ * numbers are as good as none.
+ */
+export function sayVerdict(result: { verdict: Verdict; leewayMm: number | null }): string {
+  if (result.verdict === 'unknown' && result.leewayMm !== null && result.leewayMm >= 0)
+    return 'has wearing ease';
+  return VERDICT_WORDS[result.verdict];
+}
+
 /** The five silhouettes as a sewist says them after "in the … dress,". */
 export const SILHOUETTE_WORDS: Record<Silhouette, string> = {
   close: 'close-fitting',

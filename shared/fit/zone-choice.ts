@@ -38,7 +38,8 @@ export function zoneCosts(reckoning: Reckoning): ZoneCosts {
   const deviationCosts = zeros(garment.zones.length * sizes);
   const speaks = garment.zones.map(() => false);
   for (const { spec, at, chooses, case: found } of reckoning.points) {
-    if (!chooses && found !== 'noTarget') continue;
+    // Finished only without a target: the floor is all it can say.
+    if (!chooses && !(found === 'noTarget' && spec.floorBinds && !Number.isNaN(spec.wearingMm))) continue;
     speaks[spec.zoneAt] = true;
     const from = spec.zoneAt * sizes;
     const isLoose = chooses && spec.role === 'loose';
@@ -48,7 +49,7 @@ export function zoneCosts(reckoning: Reckoning): ZoneCosts {
       let cost = byDeviation + (floorCost[i] as number);
       if (isLoose) {
         const share = (deviation[i] as number) / (half[i] as number);
-        cost += NEARNESS * share * share;
+        cost += NEARNESS * (share < 0 ? -share : share);
       }
       costs[from + s] = (costs[from + s] as number) + cost;
       deviationCosts[from + s] = (deviationCosts[from + s] as number) + byDeviation;

@@ -7,19 +7,19 @@ export interface ScaleKnot {
 /**
  * Where a value lies on a scale given by knots in rising order: straight lines between them, the first and last drawn
  * on beyond the ends. Where knots share the value it is the middle of their positions. Fewer than two different values,
- * or values that fall, give null.
+ * values that fall and NaN give null.
  */
 export function positionAmong(knots: readonly ScaleKnot[], value: number): number | null {
   const first = knots[0];
   const last = knots[knots.length - 1];
-  if (!first || !last || !(last.value > first.value)) return null;
+  if (!first || !last || !(last.value > first.value) || Number.isNaN(value)) return null;
   let before: ScaleKnot | null = null;
   let after: ScaleKnot | null = null;
   let equalFrom: number | null = null;
   let equalTo = 0;
   for (let k = 0; k < knots.length; k++) {
     const knot = knots[k];
-    if (!knot || knot.value < (knots[k - 1]?.value ?? -Infinity)) return null;
+    if (!knot || !(knot.value >= (knots[k - 1]?.value ?? -Infinity))) return null;
     if (knot.value < value) before = knot;
     else if (knot.value > value) after ??= knot;
     else {

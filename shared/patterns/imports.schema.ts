@@ -61,11 +61,22 @@ export const importCorrectionsSchema = z.object({
 });
 export type ImportCorrections = z.infer<typeof importCorrectionsSchema>;
 
-/** The details while they are being written: everything may still be missing. */
-export const draftDetailsSchema = z.object({
-  ...patternInputSchema.partial().shape,
-  title: z.string().trim().max(120).optional(),
-});
+const { shape } = patternInputSchema;
+
+/** The details while they are being written: everything may still be missing, and nothing is filled in that was not sent. */
+export const draftDetailsSchema = z
+  .object({
+    ...shape,
+    title: z.string().trim().max(120),
+    maker: shape.maker.unwrap(),
+    number: shape.number.unwrap(),
+    cloth: shape.cloth.unwrap(),
+    worn: shape.worn.unwrap(),
+    seamEdges: shape.seamEdges.unwrap(),
+    compareAs: shape.compareAs.unwrap(),
+    notes: shape.notes.unwrap(),
+  })
+  .partial();
 export type DraftDetails = z.infer<typeof draftDetailsSchema>;
 
 /** What a person may change on a draft. */

@@ -8,7 +8,7 @@ import { TextField } from '../ui/field.tsx';
 import { FormErrors } from '../ui/form-errors.tsx';
 import { TextLink } from '../ui/link.tsx';
 import { summaryOf } from '../ui/use-server-errors.ts';
-import { signInWords } from './enter-error.ts';
+import { enterWords } from './enter-error.ts';
 import { EnterPage, skipWhenSignedIn } from './enter-page.tsx';
 import { PasswordField } from './password-field.tsx';
 import { useEnter } from './use-enter.ts';
@@ -23,7 +23,11 @@ const FIELDS = [
 export function Component() {
   const { search } = useLocation();
   const enter = useEnter<{ email: string; password: string }>('/api/auth/sign-in/email');
-  const form = useForm({ resolver: zodResolver(signInSchema), defaultValues: { email: '', password: '' } });
+  const form = useForm({
+    resolver: zodResolver(signInSchema),
+    defaultValues: { email: '', password: '' },
+    shouldFocusError: false,
+  });
   const { errors, submitCount } = form.formState;
   return (
     <EnterPage
@@ -40,7 +44,7 @@ export function Component() {
         onSubmit={(event) => void form.handleSubmit((values) => enter.mutate(values))(event)}
       >
         <FormErrors
-          items={summaryOf(errors, FIELDS, enter.isError ? [signInWords(enter.error)] : [])}
+          items={summaryOf(errors, FIELDS, enter.isError ? [enterWords(enter.error)] : [])}
           attempt={submitCount + enter.failureCount}
         />
         <TextField

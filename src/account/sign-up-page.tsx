@@ -7,8 +7,8 @@ import { Button } from '../ui/button.tsx';
 import { TextField } from '../ui/field.tsx';
 import { FormErrors } from '../ui/form-errors.tsx';
 import { TextLink } from '../ui/link.tsx';
-import { summaryOf } from '../ui/use-server-errors.ts';
-import { signUpWords } from './enter-error.ts';
+import { summaryOf, useServerErrors } from '../ui/use-server-errors.ts';
+import { enterWords } from './enter-error.ts';
 import { EnterPage, skipWhenSignedIn } from './enter-page.tsx';
 import { PasswordField } from './password-field.tsx';
 import { useEnter } from './use-enter.ts';
@@ -20,6 +20,7 @@ const FIELDS = [
   { name: 'email', label: 'E-mail address' },
   { name: 'password', label: 'Password' },
 ] as const;
+const NAMES = FIELDS.map(({ name }) => name);
 
 export function Component() {
   const { search } = useLocation();
@@ -27,8 +28,14 @@ export function Component() {
   const form = useForm({
     resolver: zodResolver(signUpSchema),
     defaultValues: { name: '', email: '', password: '' },
+    shouldFocusError: false,
   });
   const { errors, submitCount } = form.formState;
+  const server = useServerErrors(form, NAMES, enterWords);
+  const submit = form.handleSubmit((values) => {
+    server.clear();
+    enter.mutate(values, { onError: server.place });
+  });
   return (
     <EnterPage
       title="Make an account"
@@ -39,13 +46,9 @@ export function Component() {
         </>
       }
     >
-      <form
-        noValidate
-        className="space-y-6"
-        onSubmit={(event) => void form.handleSubmit((values) => enter.mutate(values))(event)}
-      >
+      <form noValidate className="space-y-6" onSubmit={(event) => void submit(event)}>
         <FormErrors
-          items={summaryOf(errors, FIELDS, enter.isError ? [signUpWords(enter.error)] : [])}
+          items={summaryOf(errors, FIELDS, server.rest)}
           attempt={submitCount + enter.failureCount}
         />
         <TextField

@@ -9,13 +9,15 @@ import { DemoPlan } from './demo-plan.tsx';
 export function Component() {
   return (
     <>
-      <PageHeading title="Leeway">Know the room before you cut</PageHeading>
-      <p className="mt-3 max-w-[62ch] text-lead text-ink-2">
-        Leeway holds a person’s measurements against a pattern’s size chart and its finished measurements. It
-        says which size to cut where, shows the room that leaves at every point, and lets you try another size
-        and see at once what it does. Everybody and everything below is invented: take hold of it.
-      </p>
-      <div className="mt-9 border-t-2 border-ink pt-1">
+      <div className="grid items-start gap-x-14 gap-y-3 lg:grid-cols-[minmax(0,1fr)_minmax(0,2fr)]">
+        <PageHeading title="Leeway">Know the room before you cut</PageHeading>
+        <p className="max-w-[66ch] text-ink-2 lg:pt-1">
+          Leeway holds a person’s measurements against a pattern’s size chart and its finished measurements.
+          It says which size to cut where, shows the room that leaves at every point, and lets you try another
+          size and see at once what it does. Everybody and everything below is invented: take hold of it.
+        </p>
+      </div>
+      <div className="mt-7 border-t-2 border-ink pt-1">
         <div className="border-t-2 border-dashed border-woad pt-7">
           <DemoPlan />
         </div>

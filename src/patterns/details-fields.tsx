@@ -4,7 +4,7 @@ import { RadioGroup } from '../ui/choice.tsx';
 import { SelectField, TextArea, TextField } from '../ui/field.tsx';
 import { Notice } from '../ui/notice.tsx';
 import { messageAt } from '../ui/use-server-errors.ts';
-import { SEAM_LEVELS, type DetailsValues } from './details-values.ts';
+import { seamLevels, type DetailsValues } from './details-values.ts';
 import { KIND_OPTIONS, SILHOUETTE_CHOICES } from './pattern-words.ts';
 
 interface DetailsFormProps<Output> {
@@ -12,8 +12,26 @@ interface DetailsFormProps<Output> {
   form: UseFormReturn<DetailsValues, unknown, Output>;
 }
 
-/** What is printed on the envelope, in the order in which one reads it there. */
+/** What is printed on the envelope: what it is at the left, how it is meant to sit at the right. */
 export function DetailsFields<Output>({ form }: DetailsFormProps<Output>) {
+  return (
+    <div className="grid items-start gap-x-16 gap-y-8 xl:grid-cols-2">
+      <WhatItIs form={form} />
+      <HowItSits form={form} />
+      <div className="xl:col-span-2">
+        <TextArea
+          {...form.register('notes')}
+          id="notes"
+          label="Notes"
+          hint="For you alone: closures, linings, what to remember next time."
+          error={form.formState.errors.notes?.message}
+        />
+      </div>
+    </div>
+  );
+}
+
+function WhatItIs<Output>({ form }: DetailsFormProps<Output>) {
   const { register } = form;
   const { errors } = form.formState;
   const structure = useWatch({ control: form.control, name: 'structure' });
@@ -27,7 +45,7 @@ export function DetailsFields<Output>({ form }: DetailsFormProps<Output>) {
         autoComplete="off"
         error={errors.title?.message}
       />
-      <div className="grid gap-x-8 gap-y-8 sm:grid-cols-[2fr_1fr]">
+      <div className="grid grid-cols-[2fr_1fr] gap-x-8">
         <TextField
           {...register('maker')}
           id="maker"
@@ -50,14 +68,6 @@ export function DetailsFields<Output>({ form }: DetailsFormProps<Output>) {
         options={[{ value: '', label: 'Choose the kind' }, ...KIND_OPTIONS]}
         error={errors.kind?.message}
       />
-      <ChoiceList
-        {...register('silhouette')}
-        id="silhouette"
-        label="Silhouette"
-        hint="How much room the garment is meant to have. The envelope’s description or drawing says."
-        choices={SILHOUETTE_CHOICES}
-        error={errors.silhouette?.message}
-      />
       <div>
         <RadioGroup
           {...register('structure')}
@@ -73,8 +83,8 @@ export function DetailsFields<Output>({ form }: DetailsFormProps<Output>) {
           {structure === 'knit' && (
             <Notice className="mt-3">
               <p>
-                Knits are not reckoned yet. The pattern and its tables are kept as they are, and a plan will say that it
-                cannot judge the stretch.
+                Knits are not reckoned yet. The pattern and its tables are kept as they are, and a plan will
+                say that it cannot judge the stretch.
               </p>
             </Notice>
           )}
@@ -88,6 +98,23 @@ export function DetailsFields<Output>({ form }: DetailsFormProps<Output>) {
         autoComplete="off"
         error={errors.cloth?.message}
       />
+    </div>
+  );
+}
+
+function HowItSits<Output>({ form }: DetailsFormProps<Output>) {
+  const { register } = form;
+  const { errors } = form.formState;
+  return (
+    <div className="space-y-8">
+      <ChoiceList
+        {...register('silhouette')}
+        id="silhouette"
+        label="Silhouette"
+        hint="How much room the garment is meant to have. The envelope’s description or drawing says."
+        choices={SILHOUETTE_CHOICES}
+        error={errors.silhouette?.message}
+      />
       <RadioGroup
         {...register('worn')}
         id="worn"
@@ -100,28 +127,22 @@ export function DetailsFields<Output>({ form }: DetailsFormProps<Output>) {
         error={errors.worn?.message}
       />
       <SeamEdges form={form} />
-      <TextArea
-        {...register('notes')}
-        id="notes"
-        label="Notes"
-        hint="For you alone: closures, linings, what to remember next time."
-        error={errors.notes?.message}
-      />
     </div>
   );
 }
 
 function SeamEdges<Output>({ form }: DetailsFormProps<Output>) {
+  const kind = useWatch({ control: form.control, name: 'kind' });
   return (
     <fieldset aria-describedby="seam-edges-hint">
       <legend className="text-note font-semibold">Seam edges</legend>
       <p id="seam-edges-hint" className="max-w-[36rem] text-small text-ink-2">
-        A change in girth is shared over the cut edges of the seams that cross a level. A side seam has two edges, front
-        and back, so two side seams are 4. Each further seam that may take a share, such as one from shoulder to hem,
-        adds 2.
+        A change in girth is shared over the cut edges of the seams that cross a level. A side seam has two
+        edges, front and back, so two side seams are 4. Each further seam that may take a share, such as one
+        from shoulder to hem, adds 2.
       </p>
       <div className="mt-2 grid max-w-[26rem] grid-cols-3 gap-x-8">
-        {SEAM_LEVELS.map((level) => (
+        {seamLevels(kind).map((level) => (
           <TextField
             key={level}
             {...form.register(`seamEdges.${level}`)}

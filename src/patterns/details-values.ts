@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { zonesOf } from '../../shared/fit/garments.ts';
 import { draftDetailsSchema, type DraftDetails } from '../../shared/patterns/imports.schema.ts';
 import { patternInputSchema, type PatternInput } from '../../shared/patterns/patterns.schema.ts';
 import type { PointId } from '../../shared/points/point-ids.ts';
@@ -30,15 +31,22 @@ export const DETAILS_FIELDS = [
   { name: 'maker', label: 'Maker' },
   { name: 'number', label: 'Number' },
   { name: 'kind', label: 'Kind of garment' },
-  { name: 'silhouette', label: 'Silhouette' },
   { name: 'structure', label: 'Woven or knit' },
   { name: 'cloth', label: 'Cloth it is meant for' },
+  { name: 'silhouette', label: 'Silhouette' },
   { name: 'worn', label: 'Worn' },
   { name: 'seamEdges.bust', label: 'Seam edges at the bust' },
   { name: 'seamEdges.waist', label: 'Seam edges at the waist' },
   { name: 'seamEdges.hip', label: 'Seam edges at the hip' },
   { name: 'notes', label: 'Notes' },
 ] as const;
+
+/** The levels that a garment of this kind has: trousers have no bust. All of them while the kind is not chosen. */
+export function seamLevels(kind: DetailsValues['kind']): readonly SeamLevel[] {
+  if (kind === '') return SEAM_LEVELS;
+  const zones = zonesOf(kind);
+  return SEAM_LEVELS.filter((level) => zones.includes(level));
+}
 
 /** The form's beginning: what is known, and what most patterns are where nothing is. */
 export function toValues(details: DraftDetails): DetailsValues {
@@ -67,9 +75,10 @@ export type KeptDetails = Pick<DraftDetails, 'seamEdges' | 'compareAs'>;
 function toCandidate(values: DetailsValues, kept: KeptDetails): Record<string, unknown> {
   const { kind, silhouette, structure, seamEdges, ...texts } = values;
   const edges: Partial<Record<PointId, number>> = { ...kept.seamEdges };
+  const levels = seamLevels(kind);
   for (const level of SEAM_LEVELS) {
     const text = seamEdges[level].trim();
-    if (text === '') Reflect.deleteProperty(edges, level);
+    if (text === '' || !levels.includes(level)) Reflect.deleteProperty(edges, level);
     else edges[level] = Number(text);
   }
   const chosen = Object.entries({ kind, silhouette, structure }).filter(([, value]) => value !== '');

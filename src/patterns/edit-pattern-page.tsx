@@ -59,7 +59,7 @@ function EditForm({ pattern }: { pattern: Pattern }) {
     await navigate(paths.pattern(pattern.id), { replace: true });
   });
   return (
-    <form noValidate className="max-w-[44rem]" onSubmit={(event) => void submit(event)}>
+    <form noValidate className="max-w-[44rem] xl:max-w-[68rem]" onSubmit={(event) => void submit(event)}>
       <FormErrors
         items={summaryOf(errors, DETAILS_FIELDS, server.rest)}
         attempt={isSubmitting ? 0 : submitCount}

@@ -2,6 +2,7 @@ import type { MeasurementSet, Person } from '../../shared/people/people.schema.t
 import { MEASURING_ORDER, pointName } from '../../shared/points/catalogue.ts';
 import { printLength } from '../../shared/units.ts';
 import { printDay } from '../ui/day.ts';
+import { Length } from '../ui/length.tsx';
 import { RowHead, Table, Td, Th } from '../ui/table.tsx';
 import { printMeasurement, typedOtherwise } from './print-measurement.ts';
 
@@ -31,23 +32,29 @@ export function CompareTable({ set, before, chestWord }: CompareTableProps) {
           const typed = now ? typedOtherwise(now) : null;
           return (
             <tr key={point}>
-              <RowHead>{pointName(point, chestWord)}</RowHead>
+              <RowHead className="min-w-24">{pointName(point, chestWord)}</RowHead>
               <Td number>
-                {now ? <span className="length font-semibold">{printMeasurement(now)}</span> : <NotTaken />}
-                {typed !== null && <span className="length block text-small text-ink-2">typed {typed}</span>}
+                {now ? (
+                  <span className="font-semibold">
+                    <Length text={printMeasurement(now)} />
+                  </span>
+                ) : (
+                  <NotTaken />
+                )}
+                {typed !== null && (
+                  <span className="block text-small text-ink-2">
+                    typed <Length text={typed} />
+                  </span>
+                )}
               </Td>
               {before && (
                 <Td number className="text-ink-2">
-                  {then ? <span className="length">{printMeasurement(then)}</span> : <NotTaken />}
+                  {then ? <Length text={printMeasurement(then)} /> : <NotTaken />}
                 </Td>
               )}
               {before && (
                 <Td number>
-                  {now && then && (
-                    <span className="length">
-                      {printLength(now.mm - then.mm, now.unit, { signed: true })}
-                    </span>
-                  )}
+                  {now && then && <Length text={printLength(now.mm - then.mm, now.unit, { signed: true })} />}
                 </Td>
               )}
             </tr>

@@ -4,6 +4,7 @@ import type { Measurement, Person } from '../../shared/people/people.schema.ts';
 import { howToTake, MEASURING_ORDER, pointName } from '../../shared/points/catalogue.ts';
 import type { PointId } from '../../shared/points/point-ids.ts';
 import { printDay } from '../ui/day.ts';
+import { Length } from '../ui/length.tsx';
 import { SectionHeading } from '../ui/page-heading.tsx';
 import { Table, Td, Th } from '../ui/table.tsx';
 import { BodyFigure } from './drawing/body-figure.tsx';
@@ -79,8 +80,14 @@ function PointRow({ point, chestWord, measurement, onEnter, onLeave }: PointRowP
         </details>
       </th>
       <Td number className="py-2">
-        <span className="length text-lead font-semibold">{printMeasurement(measurement)}</span>
-        {typed !== null && <span className="length block text-small text-ink-2">typed {typed}</span>}
+        <span className="text-lead font-semibold">
+          <Length text={printMeasurement(measurement)} />
+        </span>
+        {typed !== null && (
+          <span className="block text-small text-ink-2">
+            typed <Length text={typed} />
+          </span>
+        )}
       </Td>
     </tr>
   );

@@ -88,7 +88,7 @@ function AllSets({ personId }: { personId: string }) {
 function WhatElse({ person }: { person: Person }) {
   const navigate = useNavigate();
   const remove = useDeletePerson();
-  const sets = person.setCount === 1 ? 'the one measurement set' : `all ${person.setCount} measurement sets`;
+  const sets = person.setCount === 1 ? 'the one measurement set' : `${person.setCount} measurement sets`;
   return (
     <div className="mt-12 flex flex-wrap gap-x-7 border-t border-rule pt-4 print:hidden">
       <ButtonLink kind="quiet" to={paths.editPerson(person.id)}>
@@ -105,7 +105,7 @@ function WhatElse({ person }: { person: Person }) {
         <p>
           {person.setCount === 0
             ? 'Their name and notes go.'
-            : `With them go ${sets} and every plan saved from them.`}
+            : `With the name and notes go ${sets} and every plan saved from them.`}
         </p>
         <p>It cannot be undone.</p>
       </DeleteButton>

@@ -7,9 +7,9 @@ export const printMeasurement = ({ mm, unit }: Measurement): string => printLeng
 /** What was typed, where that reads otherwise than the value beside it; null where it would only repeat it. */
 export function typedOtherwise({ typed, mm, unit }: Measurement): string | null {
   const plain = printLength(mm, unit);
-  return [plain, `${plain} ${unit}`, `${plain}${unit}`, plain.replace(/\.0$/, '')].includes(typed)
-    ? null
-    : typed;
+  const numbers = [plain, plain.replace(/\.0$/, '')];
+  const written = numbers.flatMap((number) => [number, `${number} ${unit}`, `${number}${unit}`]);
+  return written.includes(typed) ? null : typed;
 }
 
 /** The text to begin a field with: as typed, and with its unit written out where the form assumes another. */
@@ -17,7 +17,3 @@ export function textForForm({ typed, unit }: Measurement, assumed: LengthUnit): 
   const read = parseLength(typed, assumed);
   return read.ok && read.unit !== unit ? `${typed} ${unit}` : typed;
 }
-
-/** A length in both systems: `95.2 cm / 37 1/2 in`. */
-export const printBoth = (mm: number): string =>
-  `${printLengthWithUnit(mm, 'cm')} / ${printLengthWithUnit(mm, 'in')}`;

@@ -19,14 +19,24 @@ type RadioGroupProps = Omit<ComponentProps<'input'>, 'type' | 'value'> & {
 const MARK = 'size-5 shrink-0 accent-woad';
 
 /** One of a few, all in sight. The rest of its properties go to every radio, a form library's among them. */
-export function RadioGroup({ label, hint, error, choices, value, className, ...input }: RadioGroupProps) {
-  const id = useId();
+export function RadioGroup({
+  label,
+  hint,
+  error,
+  choices,
+  value,
+  className,
+  id: givenId,
+  ...input
+}: RadioGroupProps) {
+  const madeId = useId();
+  const id = givenId ?? madeId;
   return (
     <fieldset
-      aria-describedby={[
-        hint === undefined ? '' : `${id}-hint`,
-        error === undefined ? '' : `${id}-error`,
-      ].join(' ')}
+      aria-describedby={
+        [hint === undefined ? '' : `${id}-hint`, error === undefined ? '' : `${id}-error`].join(' ').trim() ||
+        undefined
+      }
       className={className}
     >
       <legend className="text-note font-semibold">{label}</legend>
@@ -36,11 +46,13 @@ export function RadioGroup({ label, hint, error, choices, value, className, ...i
         </p>
       )}
       <div className="flex flex-wrap gap-x-7">
-        {choices.map((choice) => (
+        {choices.map((choice, index) => (
           <label key={choice.value} className="flex min-h-11 items-center gap-2.5">
             <input
               type="radio"
               {...input}
+              // The group's own id leads to its first choice, so that a link from a summary can land here.
+              id={index === 0 ? id : `${id}-${choice.value}`}
               value={choice.value}
               {...(value === undefined ? {} : { checked: value === choice.value })}
               className={MARK}

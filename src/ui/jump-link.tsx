@@ -11,7 +11,15 @@ export function jumpTo(id: string) {
 }
 
 /** A link to another place on the same page. The address stays: a change of it would be a navigation. */
-export function JumpLink({ to, className, children }: { to: string; className?: string; children: ReactNode }) {
+export function JumpLink({
+  to,
+  className,
+  children,
+}: {
+  to: string;
+  className?: string;
+  children: ReactNode;
+}) {
   return (
     <a
       href={`#${to}`}

@@ -23,7 +23,7 @@ export function Th({ number = false, className, ...rest }: ComponentProps<'th'> 
     <th
       scope="col"
       {...rest}
-      className={`border-b border-rule py-2 pr-6 align-bottom text-small font-normal text-ink-2 last:pr-0 ${
+      className={`border-b border-rule py-2 pr-4 md:pr-6 align-bottom text-small font-normal text-ink-2 last:pr-0 md:last:pr-0 ${
         number ? 'text-right' : ''
       } ${className ?? ''}`}
     />
@@ -36,7 +36,7 @@ export function RowHead({ className, ...rest }: ComponentProps<'th'>) {
     <th
       scope="row"
       {...rest}
-      className={`border-b border-rule py-3 pr-6 align-baseline font-semibold ${className ?? ''}`}
+      className={`border-b border-rule py-3 pr-4 md:pr-6 align-baseline font-semibold ${className ?? ''}`}
     />
   );
 }
@@ -45,7 +45,7 @@ export function Td({ number = false, className, ...rest }: ComponentProps<'td'> 
   return (
     <td
       {...rest}
-      className={`border-b border-rule py-3 pr-6 align-baseline last:pr-0 ${
+      className={`border-b border-rule py-3 pr-4 md:pr-6 align-baseline last:pr-0 md:last:pr-0 ${
         number ? 'text-right whitespace-nowrap' : ''
       } ${className ?? ''}`}
     />

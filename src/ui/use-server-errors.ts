@@ -31,6 +31,7 @@ export function failureWords(error: unknown): string {
 export function useServerErrors<Values extends FieldValues>(
   form: Pick<UseFormReturn<Values>, 'setError'>,
   fields: readonly Path<Values>[],
+  words: (error: unknown) => string = failureWords,
 ) {
   const [rest, setRest] = useState<string[]>([]);
   const place = (error: unknown) => {
@@ -41,7 +42,7 @@ export function useServerErrors<Values extends FieldValues>(
       if (name === undefined) left.push(detail);
       else form.setError(name, { type: 'server', message: detail });
     }
-    setRest(problems.length === 0 ? [failureWords(error)] : left);
+    setRest(problems.length === 0 ? [words(error)] : left);
   };
   return { rest, place, clear: () => setRest([]) };
 }

@@ -1,64 +1,63 @@
 import { mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import { gzipSync } from 'node:zlib';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { testApp, type TestApp } from '../support/app.ts';
+import { testApp, type Agent } from '../support/app.ts';
 
 const folder = mkdtempSync(join(tmpdir(), 'leeway-client-'));
-mkdirSync(join(folder, 'assets'));
-writeFileSync(
-  join(folder, 'index.html'),
-  '<!doctype html><html><head><title>Leeway</title></head><body></body></html>',
-);
-writeFileSync(join(folder, 'assets/main-4f2a.js'), 'export {};');
-writeFileSync(join(folder, 'icon.svg'), '<svg xmlns="http://www.w3.org/2000/svg"/>');
-afterAll(() => rmSync(folder, { recursive: true }));
+const SCRIPT = 'console.log("bust, waist, hip");'.repeat(50);
+let agent: Agent;
 
-let test: TestApp;
 beforeAll(async () => {
-  test = await testApp({ client: { folder } });
+  mkdirSync(join(folder, 'assets'));
+  writeFileSync(join(folder, 'index.html'), '<html><head></head><body><div id="root"></div></body></html>');
+  writeFileSync(join(folder, 'assets/main-1a2b.js'), SCRIPT);
+  writeFileSync(join(folder, 'assets/main-1a2b.js.gz'), gzipSync(SCRIPT));
+  writeFileSync(join(folder, 'secret.txt'), 'beside the assets');
+  agent = (await testApp({ client: { folder } })).anonymous();
 });
+afterAll(() => rmSync(folder, { recursive: true, force: true }));
 
-describe('the browser code', () => {
-  it('is the one page at every address that a browser opens', async () => {
-    for (const path of ['/', '/people', '/people/new', '/fit?set=a.b']) {
-      const answer = await test.anonymous().get(path).set('Accept', 'text/html').expect(200);
-      expect(answer.text).toContain('<title>Leeway</title>');
-      expect(answer.headers['cache-control']).toBe('no-store');
-    }
+describe('the built client', () => {
+  it('is sent compressed to whoever takes it, under its own type, to be kept for good', async () => {
+    const answer = await agent.get('/assets/main-1a2b.js').set('accept-encoding', 'gzip, br');
+    expect(answer.status).toBe(200);
+    expect(answer.headers).toMatchObject({
+      'content-encoding': 'gzip',
+      'content-type': 'text/javascript; charset=utf-8',
+      'cache-control': 'public, max-age=31536000, immutable',
+      vary: 'accept-encoding',
+    });
+    expect(answer.text).toBe(SCRIPT);
   });
 
-  it('carries the nonce that its headers allow, another each time', async () => {
-    const nonces = [];
-    for (let time = 0; time < 2; time += 1) {
-      const { text, headers } = await test.anonymous().get('/').set('Accept', 'text/html');
-      const nonce = /<meta property="csp-nonce" nonce="([\w-]{20,})">/.exec(text)?.[1];
-      expect(headers['content-security-policy']).toContain(`'nonce-${String(nonce)}'`);
-      nonces.push(nonce);
-    }
-    expect(nonces[0]).not.toBe(nonces[1]);
+  it('is sent as it is to whoever does not', async () => {
+    const answer = await agent.get('/assets/main-1a2b.js').set('accept-encoding', 'identity');
+    expect(answer.headers['content-encoding']).toBeUndefined();
+    expect(answer.headers['vary']).toBe('accept-encoding');
+    expect(answer.text).toBe(SCRIPT);
   });
 
-  it('is kept for a year where its name changes with it, and asked for again elsewhere', async () => {
-    const script = await test.anonymous().get('/assets/main-4f2a.js').expect(200);
-    expect(script.headers['cache-control']).toBe('public, max-age=31536000, immutable');
-    expect(script.headers['content-type']).toMatch(/javascript/);
-    const icon = await test.anonymous().get('/icon.svg').expect(200);
-    expect(icon.headers['cache-control']).toBe('public, max-age=3600');
+  it('answers 404, and no page, for a file of another build', async () => {
+    const answer = await agent.get('/assets/main-0000.js').set('accept-encoding', 'gzip');
+    expect(answer.status).toBe(404);
+    expect(answer.headers['content-encoding']).toBeUndefined();
   });
 
-  it('answers 404, not the page, to a file that is not there and to the interface', async () => {
-    for (const path of ['/assets/gone-1.js', '/gone.png', '/api/gone', '/assets/../../package.json']) {
-      const answer = await test.anonymous().get(path).set('Accept', 'text/html,*/*');
-      expect([path, answer.status]).toEqual([path, 404]);
-      expect(answer.text).not.toContain('<title>');
-    }
+  it('does not leave its folder', async () => {
+    expect((await agent.get('/assets/..%2fsecret.txt')).status).toBe(404);
+    expect((await agent.get('/assets/%2e%2e/%2e%2e/package.json')).status).toBe(404);
   });
 
-  it('gives out nothing that lies outside its folder', async () => {
-    for (const path of ['/..%2f..%2fetc%2fpasswd', '/%2e%2e/%2e%2e/etc/passwd', '/.env']) {
-      const answer = await test.anonymous().get(path).set('Accept', 'text/html');
-      expect(answer.text).not.toContain('root:');
-    }
+  it('gives the one page, never kept and with a fresh nonce, for every address that a browser opens', async () => {
+    const read = async () => agent.get('/patterns/anything').set('accept', 'text/html');
+    const [first, second] = [await read(), await read()];
+    expect(first.status).toBe(200);
+    expect(first.headers['cache-control']).toBe('no-store');
+    expect(first.text).toContain('<div id="root">');
+    const nonce = /nonce="([^"]+)"/.exec(first.text)?.[1];
+    expect(first.headers['content-security-policy']).toContain(`'nonce-${String(nonce)}'`);
+    expect(first.text).not.toBe(second.text);
   });
 });

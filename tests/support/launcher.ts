@@ -1,7 +1,6 @@
 import type { ChildProcess } from 'node:child_process';
-import { mkdtempSync, readdirSync, readFileSync, rmSync } from 'node:fs';
+import { mkdirSync, mkdtempSync, readdirSync, readFileSync, rmSync, statSync } from 'node:fs';
 import { createServer } from 'node:net';
-import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { setTimeout as wait } from 'node:timers/promises';
 import { z } from 'zod';
@@ -10,6 +9,7 @@ import { spawnTied } from '../../server/bin/tied.mjs';
 export const ROOT = join(import.meta.dirname, '../..');
 const READY_MS = 60_000;
 const GONE_MS = 20_000;
+const HOUR_MS = 3_600_000;
 
 const signInsSchema = z.array(
   z.object({ name: z.string(), email: z.email(), password: z.string(), role: z.string() }),
@@ -81,9 +81,15 @@ export async function untilReady(launched: Launched): Promise<Launched> {
   return launched;
 }
 
-/** A data folder of its own under the system's temporary folder, which other users may pass through. */
+/** A data folder of its own, ignored by git. What runs that were killed left behind an hour ago is removed. */
 export function temporaryFolder(): { path: string; remove: () => void } {
-  const path = mkdtempSync(join(tmpdir(), 'leeway-e2e-'));
+  const home = join(ROOT, '.test');
+  mkdirSync(home, { recursive: true });
+  for (const name of readdirSync(home).filter((entry) => entry.startsWith('data-'))) {
+    const path = join(home, name);
+    if (Date.now() - statSync(path).mtimeMs > HOUR_MS) rmSync(path, { recursive: true, force: true });
+  }
+  const path = mkdtempSync(join(home, 'data-'));
   return { path, remove: () => rmSync(path, { recursive: true, force: true }) };
 }
 

@@ -1,15 +1,21 @@
 import type { FitPlan } from '../../../shared/fit/fit.schema.ts';
 import type { Said } from '../../../shared/fit/say-cautions.ts';
-import { sayWatch } from '../../../shared/fit/say-cautions.ts';
-import { sayReasons } from '../../../shared/fit/say-reasons.ts';
+import { sayNotes } from '../../../shared/fit/say-notes.ts';
 import type { SayContext } from '../../../shared/fit/say-words.ts';
 
 /** How many sentences stand in the open; the rest is a click away. */
 const IN_THE_OPEN = 3;
 
+interface WatchProps {
+  plan: FitPlan;
+  context: SayContext;
+  /** Whether what is held is said here; where it can be let go of, it is said there. */
+  saysHeld: boolean;
+}
+
 /** What stands under the answer: what to watch and to measure again first, then why the plan is what it is. */
-export function Watch({ plan, context }: { plan: FitPlan; context: SayContext }) {
-  const said = [...sayWatch(plan, context), ...sayReasons(plan, context)];
+export function Watch({ plan, context, saysHeld }: WatchProps) {
+  const said = sayNotes(plan, context).filter((each) => saysHeld || each.code !== 'held');
   const first = said.slice(0, IN_THE_OPEN);
   const rest = said.slice(IN_THE_OPEN);
   if (said.length === 0) return null;

@@ -34,6 +34,7 @@ export function EaseBar({ result, ladder, sizes, domain, width, height, fillId }
         y={band.top}
         height={band.height}
         fill={fillOf(verdict, fillId)}
+        {...(verdict === 'unknown' && { stroke: 'var(--woad)', strokeOpacity: 0.55 })}
       />
       {floorMm !== null && (
         <line x1={from} x2={from} y1={band.top - 4} y2={foot + 4} stroke="var(--ink-2)" strokeWidth="1.5" />

@@ -1,5 +1,5 @@
 import type { FitPlan, Measured } from '../../../shared/fit/fit.schema.ts';
-import { capital, sayPoint, sayZone, VERDICT_WORDS, type SayContext } from '../../../shared/fit/say-words.ts';
+import { capital, sayPoint, sayZone, sayVerdict, type SayContext } from '../../../shared/fit/say-words.ts';
 import { printLength } from '../../../shared/units.ts';
 import { Length } from '../../ui/length.tsx';
 import { RowHead, Table, Td, Th } from '../../ui/table.tsx';
@@ -26,7 +26,7 @@ export function FitTable({ plan, held, context }: { plan: FitPlan; held: Held; c
         </tr>
       </thead>
       <tbody>
-        {rowsInOrder(plan.zones, plan.points).map((row) => (
+        {rowsInOrder(plan).map((row) => (
           <Row key={row.key} row={row} isHeld={held[row.zone] !== undefined} context={context} />
         ))}
       </tbody>
@@ -45,7 +45,8 @@ function Row({ row, isHeld, context }: { row: FitRow; isHeld: boolean; context: 
         <Td>{zone}</Td>
         <Td>{size}</Td>
         <Td colSpan={8} className="text-ink-2">
-          no measured point; follows its neighbour
+          nothing to compare; follows{' '}
+          {row.follows === null ? 'its neighbour' : `the ${sayZone(row.follows, context.chestWord)}`}
         </Td>
       </tr>
     );
@@ -70,7 +71,7 @@ function Row({ row, isHeld, context }: { row: FitRow; isHeld: boolean; context: 
       {print(result.floorMm)}
       {print(result.leewayMm)}
       <Td className={result.verdict === 'belowFloor' ? 'font-semibold text-madder' : ''}>
-        {VERDICT_WORDS[result.verdict]}
+        {sayVerdict(result)}
       </Td>
     </tr>
   );

@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react';
 import type { FitPlan } from '../../../shared/fit/fit.schema.ts';
-import { sayPlan, sayZones } from '../../../shared/fit/say-plan.ts';
+import { sayPlan } from '../../../shared/fit/say-plan.ts';
 import { listWords, sayZone } from '../../../shared/fit/say-words.ts';
 import { Watch } from './answer.tsx';
 import { BeforeCutting, Cutting, Options } from './beside.tsx';
@@ -8,6 +8,7 @@ import { FitTable } from './fit-table.tsx';
 import type { Ground, Held } from './fitting.ts';
 import { Instrument } from './instrument.tsx';
 import { Legend } from './legend.tsx';
+import { Steady } from './steady.tsx';
 
 interface FitViewProps {
   ground: Ground;
@@ -32,19 +33,21 @@ export function FitView({ ground, plan, held, onHeld, headingLevel, isPage = fal
   return (
     <>
       {isPage && <title>{`${answer.replace(/[.]$/, '')} · Leeway`}</title>}
-      <Heading
-        tabIndex={-1}
-        aria-live="polite"
-        className="mt-3 max-w-[21em] text-answer font-bold tracking-[-0.02em] break-words outline-none"
-      >
-        {answer}
-      </Heading>
-      <Watch plan={plan} context={context} />
-      {onHeld && isHeld && <BackToPlan ground={ground} held={held} onBack={() => onHeld({})} />}
+      <Steady until={isHeld ? ground : null}>
+        <Heading
+          tabIndex={-1}
+          aria-live="polite"
+          className="mt-3 max-w-[25em] text-answer font-bold tracking-[-0.02em] break-words outline-none"
+        >
+          {answer}
+        </Heading>
+        <Watch plan={plan} context={context} saysHeld={!onHeld} />
+      </Steady>
+      {onHeld && plan.zones.length > 0 && <HoldLine ground={ground} held={held} onBack={() => onHeld({})} />}
       {actions}
       {plan.zones.length > 0 && (
         <>
-          <section aria-label="The instrument" className="mt-7">
+          <section aria-label="The instrument" className="mt-1">
             <Instrument
               ground={ground}
               plan={plan}
@@ -79,24 +82,28 @@ export function FitView({ ground, plan, held, onHeld, headingLevel, isPage = fal
   );
 }
 
-/** What is held, and the one click that lets go of it all. */
-function BackToPlan({ ground, held, onBack }: { ground: Ground; held: Held; onBack: () => void }) {
-  const { context, plan } = ground;
+/** What is held, and the one click that lets go of it all; beforehand, that sizes can be taken hold of. */
+function HoldLine({ ground: { context }, held, onBack }: { ground: Ground; held: Held; onBack: () => void }) {
   const words = Object.entries(held).map(
     ([zone, position]) =>
-      `${sayZone(zone as keyof Held, context.chestWord)} ${context.sizes[position] ?? ''}`,
+      `${sayZone(zone as keyof Held, context.chestWord)} at ${context.sizes[position] ?? ''}`,
   );
   return (
-    <p className="mt-5 flex flex-wrap items-center gap-x-4 border-l-2 border-woad pl-4 print:hidden">
-      <span>You hold the {listWords(words)}.</span>
-      <button
-        type="button"
-        className="inline-flex min-h-11 items-center font-semibold text-woad"
-        onClick={onBack}
-      >
-        <span className="changeable leading-tight">Back to the plan</span>
-      </button>
-      <span className="text-ink-2">{sayZones(plan.zones, context)}</span>
+    <p className="mt-3 flex min-h-11 flex-wrap items-center gap-x-5 print:hidden">
+      {words.length === 0 ? (
+        <span className="text-ink-2">Another size here or there? Drag it along the path below.</span>
+      ) : (
+        <>
+          <span>You hold the {listWords(words)}.</span>
+          <button
+            type="button"
+            className="inline-flex min-h-11 items-center font-semibold text-woad"
+            onClick={onBack}
+          >
+            <span className="changeable leading-tight">Back to the plan</span>
+          </button>
+        </>
+      )}
     </p>
   );
 }

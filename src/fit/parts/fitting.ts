@@ -37,7 +37,7 @@ export function groundOf(input: FitInput, speech: Speech, plan: FitPlan = planUn
     context: { ...speech, sizes: input.sizes.map((size) => size.label) },
     ladders,
     bodyAt: bodyPositions(input),
-    domain: easeDomain([...domainValues(plan, 0), ...neighbourEases(plan, ladders)]),
+    domain: easeDomain([...domainValues(plan), ...neighbourEases(plan, ladders)]),
   };
 }
 
@@ -48,9 +48,9 @@ export function planHeld(ground: Ground, held: Held): FitPlan {
 }
 
 /** Every length that the ease axis must hold to show a plan. */
-export function domainValues(plan: FitPlan, least: number): number[] {
+export function domainValues(plan: FitPlan): number[] {
   return plan.points.flatMap((point) =>
-    [least, point.easeMm, point.floorMm, point.draftedEaseMm].filter((value) => value !== null),
+    [point.easeMm, point.floorMm, point.draftedEaseMm].filter((value) => value !== null),
   );
 }
 

@@ -1,6 +1,6 @@
 import type { PointResult } from '../../../shared/fit/fit.schema.ts';
 import { sayNode } from '../../../shared/fit/say-plan.ts';
-import { capital, sayPoint, sayZone, VERDICT_WORDS, type SayContext } from '../../../shared/fit/say-words.ts';
+import { capital, sayPoint, sayZone, sayVerdict, type SayContext } from '../../../shared/fit/say-words.ts';
 import { printLength, printLengthWithUnit } from '../../../shared/units.ts';
 import { Length } from '../../ui/length.tsx';
 import { EaseBar } from './ease-bar.tsx';
@@ -62,16 +62,8 @@ function PathHand(props: RowProps) {
         />
       )}
       <SizeNode
-        label={`Size at the ${sayZone(row.zone, context.chestWord)}${isHeld ? ', held' : ''}`}
-        valueText={sayNode(
-          {
-            label: row.label,
-            zone: row.zone,
-            easeMm: row.result?.easeMm ?? null,
-            verdict: row.result ? VERDICT_WORDS[row.result.verdict] : 'no measured point',
-          },
-          context,
-        )}
+        label={`Size at the ${sayZone(row.zone, context.chestWord)}`}
+        valueText={sayNode({ ...row, isHeld }, context)}
         sizeLabel={row.label}
         position={row.position}
         sizeCount={context.sizes.length}
@@ -116,53 +108,56 @@ function WideCells(props: CellProps) {
 function NarrowCells(props: CellProps) {
   const { row, layout, ground, name } = props;
   const { context } = ground;
+  const { result } = row;
   return (
     <div className="pointer-events-none grid h-full" style={{ gridTemplateColumns: layout.columns }}>
-      <span />
+      <div className="relative">
+        <HeldTag {...props} />
+      </div>
       <div className="min-w-0 py-2">
         <p className="flex items-baseline justify-between gap-x-2 leading-6">
           <span className="truncate font-semibold">{name}</span>
-          <span className="shrink-0 text-note text-ink-2">
-            <BodyValue result={row.result} context={context} short />
-          </span>
-        </p>
-        {row.result && <BarCell {...props} height={48} />}
-        {row.result && <NarrowFigures result={row.result} context={context} />}
-        <p className="flex h-5 items-center text-small">
-          {row.result && (
-            <span
-              className={`truncate ${row.result.verdict === 'belowFloor' ? 'font-semibold text-madder' : ''}`}
-            >
-              {VERDICT_WORDS[row.result.verdict]}
+          {result && (
+            <span className="shrink-0 text-note text-ink-2">
+              <Length text={printLength(result.bodyMm, context.unit)} />
             </span>
           )}
-          <span className="ml-auto">
-            <HeldWord {...props} />
-          </span>
+        </p>
+        {result && <BarCell {...props} height={48} />}
+        {result && <NarrowFigures result={result} context={context} />}
+        <p
+          className={`truncate text-small ${
+            result ? (result.verdict === 'belowFloor' ? 'font-semibold text-madder' : '') : 'text-ink-2'
+          }`}
+        >
+          {result ? sayVerdict(result) : sayFollows(row, context)}
         </p>
       </div>
     </div>
   );
 }
 
-function BodyValue({
-  result,
-  context,
-  short = false,
-}: {
-  result: PointResult | null;
-  context: SayContext;
-  short?: boolean;
-}) {
-  if (!result) return <span>{short ? 'not measured' : 'no measured point'}</span>;
+function BodyValue({ result, context }: { result: PointResult | null; context: SayContext }) {
+  if (!result) return <span>nothing to compare</span>;
+  return <Length text={printLengthWithUnit(result.bodyMm, context.unit)} />;
+}
+
+/** On the phone the word hangs under the node: beside the numbers there is no room for it. */
+function HeldTag(props: RowProps) {
+  const { row, place, layout, geometry } = props;
+  const half = 24;
+  const { x } = geometry.toXWithin(row.position);
+  const left = Math.max(0, Math.min(layout.path.width - 2 * half, x - half));
   return (
-    <Length
-      text={
-        short ? printLength(result.bodyMm, context.unit) : printLengthWithUnit(result.bodyMm, context.unit)
-      }
-    />
+    <div
+      className="absolute flex w-12 justify-center text-center text-small [&_button]:flex-col [&_button]:gap-0 [&_button]:bg-paper [&_button]:px-1"
+      style={{ left, top: place.height / 2 + 17 }}
+    >
+      <HeldWord {...props} />
+    </div>
   );
 }
+
 /** What is held says so in a word, and lets go at once. */
 function HeldWord({ row, ground, isHeld, isReadOnly, onRelease }: RowProps) {
   if (!isHeld || !row.hasNode) return null;
@@ -184,7 +179,7 @@ function BarCell({ row, ground, domain, layout, height, fillId }: RowProps & { h
   const { context } = ground;
   const box = 'relative flex items-center';
   if (!result) {
-    return <div className={`${box} text-note text-ink-2`}>follows its neighbour</div>;
+    return <div className={`${box} text-note text-ink-2`}>{sayFollows(row, context)}</div>;
   }
   if (result.easeMm === null) {
     return (
@@ -210,6 +205,10 @@ function BarCell({ row, ground, domain, layout, height, fillId }: RowProps & { h
   );
 }
 
+function sayFollows({ follows }: FitRow, { chestWord }: SayContext): string {
+  return follows === null ? 'follows its neighbour' : `follows the ${sayZone(follows, chestWord)}`;
+}
+
 /** Where only the chart is known, what can still be said: how far this body is from the one the size is drafted for. */
 function sayDeviation({ deviationMm, size }: PointResult, { unit }: SayContext): string {
   if (deviationMm === null) return '';
@@ -230,7 +229,7 @@ function Figures({ result, context }: { result: PointResult; context: SayContext
         <Figure mm={result.leewayMm} context={context} word="leeway" />
       </span>
       <span className={`pl-7 leading-snug ${isShort ? 'font-semibold text-madder' : ''}`}>
-        {VERDICT_WORDS[result.verdict]}
+        {sayVerdict(result)}
       </span>
     </>
   );

@@ -30,12 +30,12 @@ export function Instrument({ ground, plan, held, onHold, onRelease }: Instrument
   const [showsAll, setShowsAll] = useState(false);
   const [isDragging, setDragging] = useState(false);
   const { sizes } = ground.context;
-  const rows = useMemo(() => rowsInOrder(plan.zones, plan.points), [plan]);
+  const rows = useMemo(() => rowsInOrder(plan, ground.plan.zones), [plan, ground.plan]);
   const room = Math.min(sizes.length, roomForSizes(width));
   const layout = useMemo(() => layOut(rows, width, room), [rows, width, room]);
   const window = useSizeWindow(rows, { sizeCount: sizes.length, room, spare: isDragging ? 0 : 1 }, showsAll);
   const geometry = pathGeometry(window, layout.path.width, layout.path.edge);
-  const domain = useWideningDomain(ground, plan);
+  const domain = useWideningDomain(ground, plan, Object.keys(held).length > 0);
   const used = new Set(rows.map((row) => row.position));
   return (
     <div ref={box} className="relative">
@@ -50,7 +50,6 @@ export function Instrument({ ground, plan, held, onHold, onRelease }: Instrument
       />
       <div className="relative" style={{ height: layout.height }}>
         <SizePath rows={rows} layout={layout} geometry={geometry} ground={ground} />
-        <BodyLine layout={layout} domain={domain} rows={rows} />
         <BranchHeading rows={rows} layout={layout} />
         <ol className="contents">
           {rows.map((row, index) => {
@@ -75,6 +74,7 @@ export function Instrument({ ground, plan, held, onHold, onRelease }: Instrument
             );
           })}
         </ol>
+        <BodyLine layout={layout} domain={domain} rows={rows} />
       </div>
     </div>
   );
@@ -93,12 +93,12 @@ function useSizeWindow(
   return next;
 }
 
-/** The axis grows where a held size needs more room and never shrinks meanwhile: the marks would all move. */
-function useWideningDomain(ground: Ground, plan: FitPlan): EaseDomain {
+/** The axis grows where a held size needs more room, and does not shrink while one is held: the marks would all move. */
+function useWideningDomain(ground: Ground, plan: FitPlan, isHeld: boolean): EaseDomain {
   const [kept, setKept] = useState({ ground, domain: ground.domain });
-  const base = kept.ground === ground ? kept.domain : ground.domain;
-  const needed = widen(base, easeDomain(domainValues(plan, 0)));
-  if (kept.ground !== ground || needed.low !== base.low || needed.high !== base.high) {
+  const base = isHeld && kept.ground === ground ? kept.domain : ground.domain;
+  const needed = widen(base, easeDomain(domainValues(plan)));
+  if (kept.ground !== ground || needed.low !== kept.domain.low || needed.high !== kept.domain.high) {
     setKept({ ground, domain: needed });
   }
   return needed;
@@ -172,7 +172,9 @@ function BranchHeading({ rows, layout }: { rows: readonly FitRow[]; layout: Inst
       className="absolute inset-x-0 flex items-end border-b border-rule pb-1.5 text-note text-ink-2"
       style={{ top: place.top - place.heading, height: place.heading }}
     >
-      <span style={{ paddingLeft: layout.isWide ? 0 : layout.bars.left }}>The sleeve, from the shoulder</span>
+      <span style={{ paddingLeft: layout.isWide ? 0 : layout.bars.left }}>
+        {layout.isWide ? 'The sleeve, from the shoulder' : 'The sleeve'}
+      </span>
     </p>
   );
 }

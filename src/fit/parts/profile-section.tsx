@@ -13,7 +13,7 @@ export function ProfileSection({ ground, plan }: { ground: Ground; plan: FitPlan
   const box = useRef<HTMLElement>(null);
   const isNear = useIsNear(box);
   const [asked, setAsked] = useState<string | null>(null);
-  const results = rowsInOrder(plan.zones, plan.points).flatMap(({ result }) =>
+  const results = rowsInOrder(plan).flatMap(({ result }) =>
     result?.easeMm === null || result === null ? [] : [result],
   );
   const result = results.find(({ point }) => point === asked) ?? results[0];

@@ -1,4 +1,4 @@
-import type { PointResult, ZonePlan } from '../../../shared/fit/fit.schema.ts';
+import type { FitPlan, PointResult, ZonePlan } from '../../../shared/fit/fit.schema.ts';
 import { ZONE_IDS, type ZoneId } from '../../../shared/fit/fit-words.ts';
 import { POINT_IDS, type PointId } from '../../../shared/points/point-ids.ts';
 
@@ -13,6 +13,8 @@ export interface FitRow {
   isBranch: boolean;
   position: number;
   label: string;
+  /** The zone that a zone without a measured point takes its size from; null where it has a point. */
+  follows: ZoneId | null;
 }
 
 /** Zones that are sewn to the shoulder and leave the trunk there. */
@@ -31,15 +33,32 @@ const DOWN_THE_BODY: readonly PointId[] = [
   'armscye',
 ];
 
-/** The rows of a plan from neck to hem. A zone without a point keeps a row of its own, so that it can be held too. */
-export function rowsInOrder(zones: readonly ZonePlan[], points: readonly PointResult[]): FitRow[] {
+/**
+ * The rows of a plan from neck to hem. A zone without a point keeps a row of its own, so that it can be held too.
+ * `unheld` are the zones with nothing held: the handle stays in their governing row, lest it leaves the hand that moves it.
+ */
+export function rowsInOrder(
+  { zones, points }: Pick<FitPlan, 'zones' | 'points'>,
+  unheld: readonly ZonePlan[] = zones,
+): FitRow[] {
   return ZONE_ORDER.flatMap((zone): FitRow[] => {
     const plan = zones.find((candidate) => candidate.zone === zone);
     if (!plan) return [];
+    const { governedBy } = unheld.find((candidate) => candidate.zone === zone) ?? plan;
     const own = points.filter((result) => result.zone === zone).sort(byHeight);
-    const base = { zone, isBranch: isBranchZone(zone), position: plan.size.position, label: plan.size.label };
-    if (own.length === 0) return [{ ...base, key: zone, result: null, hasNode: true }];
-    const handle = own.find((result) => result.point === plan.governedBy) ?? own[0];
+    const base = {
+      zone,
+      isBranch: isBranchZone(zone),
+      position: plan.size.position,
+      label: plan.size.label,
+      follows: null,
+    };
+    if (own.length === 0) {
+      return [
+        { ...base, key: zone, result: null, hasNode: true, follows: nearestMeasured(zone, zones, points) },
+      ];
+    }
+    const handle = own.find((result) => result.point === governedBy) ?? own[0];
     return own.map((result) => ({ ...base, key: result.point, result, hasNode: result === handle }));
   });
 }
@@ -51,4 +70,17 @@ function byHeight(a: PointResult, b: PointResult): number {
 function heightRank(point: PointId): number {
   const known = DOWN_THE_BODY.indexOf(point);
   return known === -1 ? DOWN_THE_BODY.length + POINT_IDS.indexOf(point) : known;
+}
+
+/** Up the body first, as the size is carried down from there; a branch hangs on the shoulder. */
+function nearestMeasured(
+  zone: ZoneId,
+  zones: readonly ZonePlan[],
+  points: readonly PointResult[],
+): ZoneId | null {
+  const trunk = ZONE_IDS.filter((each) => !isBranchZone(each) && zones.some((plan) => plan.zone === each));
+  if (isBranchZone(zone)) return trunk[0] ?? null;
+  const at = trunk.indexOf(zone);
+  const isMeasured = (each: ZoneId) => points.some((result) => result.zone === each);
+  return trunk.slice(0, at).reverse().find(isMeasured) ?? trunk.slice(at + 1).find(isMeasured) ?? null;
 }

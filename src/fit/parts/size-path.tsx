@@ -65,7 +65,7 @@ function BodyTick({
     <g stroke="var(--ink)" strokeWidth="3">
       <line x1={x} x2={x} y1={place.middle - reach} y2={place.middle + reach} />
       {isBeyond !== 0 && (
-        <line x1={x} x2={x - isBeyond * 9} y1={place.middle} y2={place.middle} strokeWidth="2" />
+        <line x1={x} x2={x + isBeyond * 8} y1={place.middle} y2={place.middle} strokeWidth="2" />
       )}
     </g>
   );

@@ -39,6 +39,9 @@ export function wholeRange(sizeCount: number): SizeWindow {
   return { start: 0, count: Math.max(1, sizeCount) };
 }
 
+/** How near the drawing's edge anything stands, in px: a stub between says that it lies further out. */
+const EDGE_PX = 8;
+
 /** Where sizes stand across a path of some width. */
 export interface PathGeometry {
   width: number;
@@ -63,8 +66,8 @@ export function pathGeometry(window: SizeWindow, width: number, edge: number): P
     toX,
     toXWithin: (position) => {
       const x = toX(position);
-      if (x < 3) return { x: 3, isBeyond: -1 };
-      if (x > width - 3) return { x: width - 3, isBeyond: 1 };
+      if (x < EDGE_PX) return { x: EDGE_PX, isBeyond: -1 };
+      if (x > width - EDGE_PX) return { x: width - EDGE_PX, isBeyond: 1 };
       return { x, isBeyond: 0 };
     },
     toPosition: (x) =>

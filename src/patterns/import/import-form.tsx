@@ -47,7 +47,7 @@ export function ImportForm({ draft }: { draft: ImportDraft }) {
       >
         <form
           noValidate
-          className="max-w-[44rem]"
+          className="max-w-[44rem] xl:max-w-[68rem]"
           onSubmit={(event) => {
             event.preventDefault();
             void saving.save();

@@ -78,7 +78,9 @@ function Obstacles({ obstacles }: { obstacles: readonly Obstacle[] }) {
   return (
     <div className="max-w-[42rem] border-l-4 border-dashed border-ink pl-4">
       <p className="font-semibold">
-        {obstacles.length === 1 ? 'One thing still stands in the way' : `${obstacles.length} things still stand in the way`}
+        {obstacles.length === 1
+          ? 'One thing still stands in the way'
+          : `${obstacles.length} things still stand in the way`}
       </p>
       <ul className="mt-1">
         {obstacles.map(({ words, targetId }) => (
@@ -93,7 +95,9 @@ function Obstacles({ obstacles }: { obstacles: readonly Obstacle[] }) {
 
 /** What will be kept, so that one knows before one does it. */
 function sayReady({ chart, finished }: ImportDraft): string {
-  const tables = (['chart', 'finished'] as const).filter((role) => (role === 'chart' ? chart : finished) !== null);
+  const tables = (['chart', 'finished'] as const).filter(
+    (role) => (role === 'chart' ? chart : finished) !== null,
+  );
   const sizes = ((chart ?? finished)?.rows ?? []).map((row) => row.label);
   return `Ready: ${saySizes(sizes)}, with ${listWords(tables.map((role) => TABLE_NAMES[role]))}. All of it is kept together.`;
 }

@@ -23,7 +23,10 @@ export function forgetTyping(draftId: string) {
 }
 
 /** The values with what was kept laid over them; anything that is not of their shape is passed over. */
-export function withKeptTyping(draftId: string, values: DetailsValues): { values: DetailsValues; isKept: boolean } {
+export function withKeptTyping(
+  draftId: string,
+  values: DetailsValues,
+): { values: DetailsValues; isKept: boolean } {
   const kept = readKept(draftId);
   if (kept === null) return { values, isKept: false };
   const texts = Object.fromEntries(
@@ -52,4 +55,5 @@ function readKept(draftId: string): Record<string, unknown> | null {
   }
 }
 
-const isRecord = (value: unknown): value is Record<string, unknown> => typeof value === 'object' && value !== null;
+const isRecord = (value: unknown): value is Record<string, unknown> =>
+  typeof value === 'object' && value !== null;

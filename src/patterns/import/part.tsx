@@ -23,12 +23,15 @@ export function Part({ id, number, title, line = 'plain', beside, children }: Pa
       aria-labelledby={id}
       className={`mt-12 grid gap-x-12 gap-y-4 pt-5 lg:grid-cols-[13rem_minmax(0,1fr)] ${LINE[line]}`}
     >
-      <div className="lg:sticky lg:top-6 lg:self-start">
+      {/* On the phone what stands beside the title stays in sight by itself, as long as its step does. */}
+      <div className="contents lg:sticky lg:top-6 lg:block lg:self-start">
         <h2 id={id} tabIndex={-1} className="text-section leading-tight font-semibold">
           <span className="mr-2 text-ink-2">{number}</span>
           {title}
         </h2>
-        {beside !== undefined && <div className="mt-3">{beside}</div>}
+        {beside !== undefined && (
+          <div className="sticky top-0 z-1 bg-paper py-1 lg:static lg:mt-3">{beside}</div>
+        )}
       </div>
       <div className="min-w-0">{children}</div>
     </section>

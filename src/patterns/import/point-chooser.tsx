@@ -28,7 +28,7 @@ export const PointChooser = memo(function PointChooser(props: PointChooserProps)
       aria-describedby={describedBy}
       value={point ?? OUT}
       onChange={(event) => onChoose(POINT_IDS.find((known) => known === event.target.value) ?? null)}
-      className={`field-line min-w-36 bg-paper font-semibold ${point === null ? 'text-ink-2' : ''}`}
+      className={`field-line w-48! bg-paper font-semibold ${point === null ? 'text-ink-2' : ''}`}
     >
       <option value={OUT}>Leave this column out</option>
       {GROUPS.map(({ name, points }) => (

@@ -25,7 +25,10 @@ export function PreviewTable({ role, table, notes, shownIn, corrections }: Previ
   const sizeColumn = table.columns.find((column) => column.role === 'size');
   const columns = table.columns.filter((column) => column !== sizeColumn);
   return (
-    <WideTable label={role === 'chart' ? 'The size chart as understood' : 'The finished measurements as understood'}>
+    <WideTable
+      isTall
+      label={role === 'chart' ? 'The size chart as understood' : 'The finished measurements as understood'}
+    >
       <thead>
         <tr>
           <SizeHeading role={role} column={sizeColumn} marks={marks} />
@@ -70,7 +73,12 @@ function SizeHeading({ role, column, marks }: SizeHeadingProps) {
   const id = column ? placeIds.heading(role, column.column) : undefined;
   const notes = id === undefined ? undefined : marks.get(id);
   return (
-    <th id={id} tabIndex={-1} scope="col" className={`${STICKY_CORNER} ${noteEdge(notes)} pr-6 pb-2 font-normal`}>
+    <th
+      id={id}
+      tabIndex={-1}
+      scope="col"
+      className={`${STICKY_CORNER} ${noteEdge(notes)} pr-6 pb-2 font-normal`}
+    >
       <span className="block text-small text-ink-2">{column?.heading ?? 'no column of sizes'}</span>
       <span className="font-semibold">Size</span>
       <span className="block">
@@ -133,7 +141,10 @@ const PreviewRow = memo(function PreviewRow(props: PreviewRowProps) {
   const { role, row, sizeColumn, columns, marks, shownIn } = props;
   const rowId = placeIds.row(role, row.row);
   const labelId = sizeColumn === null ? undefined : placeIds.cell(role, row.row, sizeColumn);
-  const rowNotes = [...(marks.get(rowId) ?? []), ...(labelId === undefined ? [] : (marks.get(labelId) ?? []))];
+  const rowNotes = [
+    ...(marks.get(rowId) ?? []),
+    ...(labelId === undefined ? [] : (marks.get(labelId) ?? [])),
+  ];
   const notes = rowNotes.length === 0 ? undefined : rowNotes;
   return (
     <tr>

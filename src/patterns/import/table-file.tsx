@@ -18,7 +18,8 @@ import { useRemoveTable, useUploadTable } from '../queries.ts';
 export const dropId = (role: TableRole) => `${role}-file`;
 
 const ALLOWED = `A CSV file: a heading row of points, then a row for each size. At most 5 MB, ${SIZES_MAX} sizes and ${POINTS_MAX} points.`;
-const TOO_LARGE = 'This file is larger than 5 MB. A table of 200 sizes is far smaller: bring the table alone.';
+const TOO_LARGE =
+  'This file is larger than 5 MB. A table of 200 sizes is far smaller: bring the table alone.';
 
 interface TableFileProps {
   draft: ImportDraft;

@@ -71,7 +71,8 @@ function Understood({ draft, role, table, shownIn, onShowIn }: UnderstoodProps) 
               options={UNIT_OPTIONS}
               onChange={(unit) => corrections.chooseUnit(unit)}
             />
-            , {UNIT_FROM_WORDS[table.unitFrom]}; cells set apart by {DELIMITER_WORDS[table.delimiter] ?? table.delimiter}
+            , {UNIT_FROM_WORDS[table.unitFrom]}; cells set apart by{' '}
+            {DELIMITER_WORDS[table.delimiter] ?? table.delimiter}
             {table.decimalComma ? ', decimals after a comma' : ''}. Understood lengths are shown in{' '}
             <SentenceSelect
               label="Unit for showing what was understood"
@@ -90,11 +91,14 @@ function Understood({ draft, role, table, shownIn, onShowIn }: UnderstoodProps) 
           </Notice>
         </div>
       )}
-      <NoteList notes={notes} label={`What to look at in ${role === 'chart' ? 'the size chart' : 'the finished measurements'}`} />
+      <NoteList
+        notes={notes}
+        label={`What to look at in ${role === 'chart' ? 'the size chart' : 'the finished measurements'}`}
+      />
       {notes.some(({ issue }) => issue.severity === 'error') && hasTable && (
         <p className="mt-3 max-w-[42rem] text-note text-ink-2">
-          Mend a cell in the file and choose the file again, or leave its column out in the heading. Nothing else you
-          entered changes.
+          Mend a cell in the file and choose the file again, or leave its column out in the heading. Nothing
+          else you entered changes.
         </p>
       )}
       {hasTable && (

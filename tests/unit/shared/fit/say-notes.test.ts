@@ -3,6 +3,7 @@ import type { Blend, Caution, FitPlan, PointResult, Reason } from '../../../../s
 import { CAUTION_CODES, REASON_CODES } from '../../../../shared/fit/fit-words.ts';
 import { sayBorderline, sayCautions, sayWatch } from '../../../../shared/fit/say-cautions.ts';
 import { sayBeforeCutting, sayBlend, sayGivenUp, sayOption } from '../../../../shared/fit/say-cutting.ts';
+import { sayNotes } from '../../../../shared/fit/say-notes.ts';
 import { sayProfile } from '../../../../shared/fit/say-profile.ts';
 import { sayReasons } from '../../../../shared/fit/say-reasons.ts';
 import type { SayContext } from '../../../../shared/fit/say-words.ts';
@@ -101,6 +102,16 @@ describe('cautions and reasons', () => {
     expect(words('in')).toBe('The upper arm has 7/16 in less than wearing ease.');
   });
 
+  it('say it once for several points', () => {
+    const cautions: Caution[] = [
+      { code: 'belowFloor', point: 'waist', amountMm: 29 },
+      { code: 'belowFloor', point: 'hip', amountMm: 186 },
+    ];
+    expect(sayCautions(cautions, context)[0]?.words).toBe(
+      'Less than wearing ease: waist by 2.9 cm and hip by 18.6 cm.',
+    );
+  });
+
   it('name the size that is held', () => {
     expect(sayReasons(plan({ reasons: [{ code: 'held', zone: 'hip' }] }), context)[0]?.words).toContain(
       'hip 16',
@@ -126,8 +137,30 @@ describe('sayWatch', () => {
 
   it('asks for another measuring where the tape could turn the verdict', () => {
     const words = sayBorderline([point({ point: 'hip', borderline: true, leewayMm: 9 })], context)?.words;
-    expect(words).toBe('Measure the hip again first: 0.9 cm of leeway is about what a tape can be out.');
+    expect(words).toBe('Measure the hip again first: 0.9 cm of leeway is no more than a tape can be out.');
+    expect(sayBorderline([point({ point: 'hip', borderline: true, leewayMm: -2 })], context)?.words).toBe(
+      'Measure the hip again first: 0.2 cm is no more than a tape can be out.',
+    );
     expect(sayBorderline([point({ point: 'hip' })], context)).toBeNull();
+  });
+});
+
+describe('sayNotes', () => {
+  it('says what to watch first, then what was given up, and last what only explains', () => {
+    const codes = sayNotes(
+      plan({
+        reasons: [
+          { code: 'governs', point: 'hip', zone: 'hip' },
+          { code: 'oneSizeIsEnough', point: 'waist', zone: 'waist' },
+        ],
+        cautions: [
+          { code: 'easeUnknown', point: 'waist' },
+          { code: 'belowFloor', point: 'hip', amountMm: 4 },
+        ],
+      }),
+      context,
+    ).map((each) => each.code);
+    expect(codes).toEqual(['belowFloor', 'oneSizeIsEnough', 'easeUnknown', 'governs']);
   });
 });
 

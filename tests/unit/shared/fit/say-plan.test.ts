@@ -201,12 +201,23 @@ describe('sayZones', () => {
 });
 
 describe('sayNode', () => {
+  const drafted = { easeMm: 60, leewayMm: 20, verdict: 'asDrafted' as const };
+
   it('reads as one breath', () => {
-    expect(sayNode({ label: '16', zone: 'hip', easeMm: 60, verdict: 'as drafted' }, context)).toBe(
+    expect(sayNode({ label: '16', zone: 'hip', result: drafted, isHeld: false }, context)).toBe(
       '16, hip: ease 6.0 cm, as drafted',
     );
-    expect(sayNode({ label: 'M', zone: 'bust', easeMm: null, verdict: 'as drafted' }, context)).toBe(
-      'M, bust: ease not published, as drafted',
+    expect(
+      sayNode({ label: 'M', zone: 'bust', result: { ...drafted, easeMm: null }, isHeld: false }, context),
+    ).toBe('M, bust: ease not published, as drafted');
+    expect(sayNode({ label: 'M', zone: 'hem', result: null, isHeld: false }, context)).toBe(
+      'M, hem: nothing to compare',
+    );
+  });
+
+  it('says that it is held', () => {
+    expect(sayNode({ label: '16', zone: 'hip', result: drafted, isHeld: true }, context)).toMatch(
+      /as drafted, held$/,
     );
   });
 });

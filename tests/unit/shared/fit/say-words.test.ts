@@ -6,6 +6,7 @@ import {
   listWords,
   sayPoint,
   sayZone,
+  sayVerdict,
   SILHOUETTE_WORDS,
   VERDICT_WORDS,
 } from '../../../../shared/fit/say-words.ts';
@@ -56,5 +57,13 @@ describe('capital', () => {
   it('raises the first letter and leaves an empty text', () => {
     expect(capital('hip')).toBe('Hip');
     expect(capital('')).toBe('');
+  });
+});
+
+describe('sayVerdict', () => {
+  it('still says wearing ease where the draft is not known', () => {
+    expect(sayVerdict({ verdict: 'unknown', leewayMm: 12 })).toBe('has wearing ease');
+    expect(sayVerdict({ verdict: 'unknown', leewayMm: null })).toBe('cannot be said');
+    expect(sayVerdict({ verdict: 'belowFloor', leewayMm: -2 })).toBe('less than wearing ease');
   });
 });

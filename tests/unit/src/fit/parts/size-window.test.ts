@@ -59,8 +59,8 @@ describe('pathGeometry', () => {
   });
 
   it('says on which side a place lies outside the drawing', () => {
-    expect(geometry.toXWithin(2)).toEqual({ x: 3, isBeyond: -1 });
-    expect(geometry.toXWithin(12)).toEqual({ x: 217, isBeyond: 1 });
+    expect(geometry.toXWithin(2)).toEqual({ x: 8, isBeyond: -1 });
+    expect(geometry.toXWithin(12)).toEqual({ x: 212, isBeyond: 1 });
     expect(geometry.toXWithin(6.5)).toEqual({ x: 130, isBeyond: 0 });
   });
 });

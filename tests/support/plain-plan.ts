@@ -1,0 +1,131 @@
+import type { FitInput, Measured } from '../../shared/fit/fit.schema.ts';
+import type { ZoneId } from '../../shared/fit/fit-words.ts';
+import type { PointId } from '../../shared/points/point-ids.ts';
+
+/** A point of a fitted dress: where it lies, its weight, twice its tape error and its wearing ease in mm. */
+interface PlainPoint {
+  point: PointId;
+  zone: ZoneId;
+  weight: number;
+  leastStep: number;
+  wearing: number | null;
+  target: number | null;
+  /** Beyond half a size its vote grows evenly only. */
+  even: boolean;
+}
+
+const IN = 25.4;
+const POINTS: PlainPoint[] = [
+  { point: 'neck', zone: 'neck', weight: 1, leastStep: 10, wearing: null, target: null, even: true },
+  {
+    point: 'upperBust',
+    zone: 'shoulder',
+    weight: 2,
+    leastStep: 20,
+    wearing: null,
+    target: null,
+    even: false,
+  },
+  { point: 'upperArm', zone: 'sleeve', weight: 1, leastStep: 10, wearing: 2 * IN, target: null, even: true },
+  { point: 'bust', zone: 'bust', weight: 2, leastStep: 20, wearing: 1.5 * IN, target: 3.5 * IN, even: false },
+  { point: 'waist', zone: 'waist', weight: 1, leastStep: 20, wearing: 0.75 * IN, target: null, even: false },
+  { point: 'hip', zone: 'hip', weight: 1, leastStep: 20, wearing: 2 * IN, target: null, even: false },
+];
+const JOINS: [ZoneId, ZoneId, number][] = [
+  ['shoulder', 'neck', 2],
+  ['shoulder', 'sleeve', 1],
+  ['shoulder', 'bust', 1],
+  ['bust', 'waist', 2],
+  ['waist', 'hip', 3],
+];
+const ZONES = POINTS.map(({ zone }) => zone);
+
+/** The point ids that the plain plan knows. */
+export const PLAIN_POINTS = POINTS.map(({ point }) => point);
+
+const low = (value: Measured) => (typeof value === 'number' ? value : value.low);
+const high = (value: Measured) => (typeof value === 'number' ? value : value.high);
+const middle = (value: Measured) => (low(value) + high(value)) / 2;
+
+/**
+ * The least cost of any plan of a fitted dress, by trying every one: the design's formulas written down once more, as
+ * plainly as can be and apart from the engine, for the points above. Null where no point chooses.
+ */
+export function plainLeastCost(input: FitInput): number | null {
+  const measured = POINTS.filter((point) => isShared(input, point));
+  if (!measured.some((point) => choosesAt(input, point))) return null;
+  const speaks = new Set(
+    measured.filter((point) => choosesAt(input, point) || point.wearing !== null).map(({ zone }) => zone),
+  );
+  const costs = measured.map((point) => input.sizes.map((_, size) => plainCost(input, point, size)));
+  let least = Infinity;
+  for (const sizes of assignments(input.sizes.length)) {
+    const at = Object.fromEntries(ZONES.map((zone, index) => [zone, sizes[index] ?? 0])) as Record<
+      ZoneId,
+      number
+    >;
+    if (!follows(speaks, at)) continue;
+    let cost = 0;
+    for (const [from, to, limit] of JOINS) {
+      const apart = Math.abs(at[from] - at[to]);
+      cost += apart > limit ? Infinity : apart === 0 ? 0 : 0.6 + 0.2 * apart ** 2;
+    }
+    if (cost >= least) continue;
+    measured.forEach(({ zone }, index) => (cost += costs[index]?.[at[zone]] ?? NaN));
+    least = Math.min(least, cost);
+  }
+  return least;
+}
+
+/** A zone without a point follows: neck, sleeve and shoulder the trunk, waist and hip the zone that leads to them. */
+function follows(speaks: ReadonlySet<ZoneId>, at: Record<ZoneId, number>): boolean {
+  if (!speaks.has('neck') && at.neck !== at.shoulder) return false;
+  if (!speaks.has('sleeve') && at.sleeve !== at.shoulder) return false;
+  if (!speaks.has('shoulder') && at.shoulder !== at.bust) return false;
+  if (!speaks.has('hip') && at.hip !== at.waist) return false;
+  return speaks.has('waist') || speaks.has('hip') || at.waist === at.bust;
+}
+
+function isShared(input: FitInput, { point }: PlainPoint): boolean {
+  const given = input.sizes[0];
+  return input.body[point] !== undefined && (given?.body[point] ?? given?.finished[point]) !== undefined;
+}
+
+function choosesAt(input: FitInput, { point, target }: PlainPoint): boolean {
+  return input.sizes[0]?.body[point] !== undefined || target !== null;
+}
+
+function plainCost(input: FitInput, plain: PlainPoint, s: number): number {
+  const { point, wearing, target } = plain;
+  const charts = input.sizes.map((size) => size.body[point]);
+  const sewn = input.sizes.map((size) => size.finished[point]);
+  const body = input.body[point] ?? NaN;
+  const chart = charts[s];
+  const garment = sewn[s];
+  const liked = body + (input.preferenceMm?.[point] ?? 0);
+  let deviation: number | null = null;
+  if (chart !== undefined) {
+    deviation = liked > high(chart) ? liked - high(chart) : liked < low(chart) ? liked - low(chart) : 0;
+  } else if (target !== null && garment !== undefined) deviation = liked + target - garment;
+  const scale = charts.map((value, index) => (value === undefined ? (sewn[index] ?? NaN) : middle(value)));
+  const down = s > 0 ? (scale[s] ?? NaN) - (scale[s - 1] ?? NaN) : Infinity;
+  const up = s < scale.length - 1 ? (scale[s + 1] ?? NaN) - (scale[s] ?? NaN) : Infinity;
+  const side = (deviation ?? 0) < 0 ? [down, up] : [up, down];
+  const step = Math.max(plain.leastStep, side.find((gap) => gap !== Infinity) ?? 50);
+  const capped = chart !== undefined && garment !== undefined ? garment - high(chart) : Infinity;
+  const floor = wearing === null ? null : Math.min(wearing, capped);
+  const meant = chart !== undefined && garment !== undefined ? garment - middle(chart) : null;
+  const aim = meant ?? (chart === undefined ? target : null);
+  const half = aim === null ? step / 2 : Math.max(step, aim - Math.max(floor ?? 0, -0.05 * body)) / 2;
+  const share = Math.abs(deviation ?? 0) / half;
+  const off = plain.even && share > 1 ? 2 * share - 1 : share ** 2;
+  const missing = floor === null || garment === undefined ? 0 : Math.max(0, floor - (garment - body));
+  return plain.weight * off + 20 * (missing / step) ** 2;
+}
+
+function* assignments(states: number): Generator<number[]> {
+  const count = states ** ZONES.length;
+  for (let n = 0; n < count; n++) {
+    yield ZONES.map((_, index) => Math.floor(n / states ** index) % states);
+  }
+}
