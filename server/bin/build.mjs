@@ -1,6 +1,7 @@
 // Builds the browser's and the server's code where the sources changed. Needs no node_modules until it builds.
 import { createHash } from 'node:crypto';
-import { existsSync, mkdirSync, readdirSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs';
+import { cpSync, existsSync, mkdirSync, readdirSync, readFileSync } from 'node:fs';
+import { renameSync, rmSync, statSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { brotliCompressSync, constants, gzipSync } from 'node:zlib';
 import { whileLocked } from './lock.mjs';
@@ -19,6 +20,9 @@ const SOURCES = [
   'src',
   'server',
 ];
+
+/** How long the files of earlier builds are served. */
+const KEPT_MS = 24 * 3_600_000;
 
 /** Two launchers in one folder with data of their own build one after the other, and the second finds it done. */
 export function buildIfChanged(root, say) {
@@ -69,11 +73,23 @@ async function build(root) {
   if (failed) throw new Sentence(`The build failed:\n${lastLines(failed.output, 30)}`);
   compressAssets(join(draft, 'client/assets'));
   rmSync(join(root, 'dist/stamp'), { force: true });
+  keepEarlierAssets(join(root, 'dist/client/assets'), join(draft, 'client/assets'));
   for (const part of ['client', 'server']) {
     rmSync(join(root, 'dist', part), { recursive: true, force: true });
     renameSync(join(draft, part), join(root, 'dist', part));
   }
   rmSync(draft, { recursive: true, force: true });
+}
+
+/** A page opened before the build still asks for the chunks of its own; their names never mean anything else. */
+function keepEarlierAssets(from, to) {
+  if (!existsSync(from)) return;
+  for (const name of readdirSync(from)) {
+    const isYoung = Date.now() - statSync(join(from, name)).mtimeMs < KEPT_MS;
+    if (isYoung && !existsSync(join(to, name))) {
+      cpSync(join(from, name), join(to, name), { preserveTimestamps: true });
+    }
+  }
 }
 
 /** Once here instead of at every request. */

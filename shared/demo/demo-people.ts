@@ -33,7 +33,7 @@ export const demoPeople: readonly DemoPerson[] = [
           thigh: '62',
           knee: '39.5',
           calf: '37',
-          upperArm: '29.6',
+          upperArm: '30.6',
           wrist: '16',
           shoulderLength: '12.6',
           shoulderWidth: '39.5',

@@ -31,10 +31,16 @@ export const STEP_ONE_SIZE_WIDTH_MM = 10;
 export const STEP_LEAST_TAPE_ERRORS = 2;
 
 /**
- * A fitted neck, sleeve or width is altered rather than chosen by, so beyond so many half-sizes its vote grows only
- * evenly: two neck sizes more never outweigh a chest on its own row. The chest rules the shoulder.
+ * A back or shoulder that is broad is altered rather than chosen by, and no tape is less sure than one held across
+ * one's own back: a width's vote counts a tenth, so that three centimetres of it never outweigh a chest on its own row.
  */
-export const ALTERED_BEYOND = 1;
+export const SHARE_OF_WIDTHS = 0.1;
+/**
+ * The chest rules the shoulder. Neck and sleeve hang on it: they take the size that is best for them within their join
+ * (points and join weigh alike, so nothing changes there), but in the whole their say is so small that it tips a tie
+ * and moves nothing else, be the neck ten sizes from the chest.
+ */
+export const SHARE_OF_HANGING = 1e-3;
 
 /**
  * Among sizes at which a loose point costs nothing, the nearest is wanted: weighed so lightly that no blend is ever

@@ -1,7 +1,13 @@
 import { MEASURES } from '../points/measures.ts';
 import type { MeasureKind } from '../points/measures.ts';
 import type { PointId } from '../points/point-ids.ts';
-import { WEIGHT_FITTED, WEIGHT_GOVERNING, WEIGHT_LOOSE } from './constants.ts';
+import {
+  SHARE_OF_HANGING,
+  SHARE_OF_WIDTHS,
+  WEIGHT_FITTED,
+  WEIGHT_GOVERNING,
+  WEIGHT_LOOSE,
+} from './constants.ts';
 import type { GarmentKind, Silhouette, ZoneId } from './fit-words.ts';
 import { garmentPoints, joinLimits, zonesOf, zoneTree } from './garments.ts';
 import type { PointRole } from './garments.ts';
@@ -16,10 +22,11 @@ export interface FitPoint {
   /** The zone's place in `FitGarment.zones`. */
   zoneAt: number;
   role: PointRole;
+  /** What its deviation weighs. */
   weight: number;
+  /** What its floor, and its pull where it is loose, are multiplied by. */
+  share: number;
   measure: MeasureKind;
-  /** Fitted, but altered rather than chosen by: neck, sleeve and widths. */
-  isAltered: boolean;
   wearingMm: number;
   targetMm: number;
   edges: number;
@@ -37,6 +44,8 @@ export interface FitGarment {
   parents: readonly number[];
   /** The most sizes a zone may lie from its parent. */
   limits: readonly number[];
+  /** What each zone and its join to its parent weigh: neck and sleeve, where they do not govern, only hang on. */
+  weights: readonly number[];
   /** From neck to hem. */
   points: readonly FitPoint[];
 }
@@ -74,21 +83,30 @@ function makeGarment(
   const tree = zoneTree(kind);
   const zones = tree.map((node) => node.zone);
   const joins = joinLimits(kind);
+  const governed = garmentPoints(kind).filter(({ role }) => role === 'governing');
+  const weights = zones.map((zone) =>
+    LEAVES.has(zone) && !governed.some((point) => point.zone === zone) ? SHARE_OF_HANGING : 1,
+  );
   return {
     zones,
+    weights,
     shown: zonesOf(kind).map((zone) => zones.indexOf(zone)),
     parents: tree.map((node) => (node.parent === null ? -1 : zones.indexOf(node.parent))),
     limits: zones.map((zone) => joins.find((join) => join.to === zone)?.limit ?? 0),
     points: garmentPoints(kind, silhouette, worn).map(({ point, zone, role }) => {
       const target = targetEase(kind, silhouette, point);
+      const { kind: measure } = MEASURES[point];
+      const zoneAt = zones.indexOf(zone);
+      const isWidth = measure === 'width' && role === 'fitted';
+      const share = (weights[zoneAt] ?? 1) * (isWidth ? SHARE_OF_WIDTHS : 1);
       return {
         point,
         zone,
-        zoneAt: zones.indexOf(zone),
+        zoneAt,
         role,
-        weight: WEIGHTS[role],
-        measure: MEASURES[point].kind,
-        isAltered: role === 'fitted' && (LEAVES.has(zone) || MEASURES[point].kind === 'width'),
+        weight: WEIGHTS[role] * share,
+        share,
+        measure,
         wearingMm: wearingEase(kind, point)?.lowMm ?? NaN,
         targetMm: target ? targetEaseMm(target) : NaN,
         edges: defaultSeamEdges(point, zone),

@@ -1,7 +1,7 @@
 import type { PointId } from '../points/point-ids.ts';
 import { TIE } from './constants.ts';
 import type { ReckonedPoint, Reckoning } from './reckoning.ts';
-import type { ZoneCosts } from './zone-choice.ts';
+import type { ZoneCosts } from './zone-costs.ts';
 
 /**
  * For each zone (by the garment's zone order) the point that decided its size: the one that loses most by the zone's

@@ -16,8 +16,10 @@ import { pointResults, sizeChoice } from './point-results.ts';
 import { reasonsFor } from './reasons.ts';
 import { reckon } from './reckoning.ts';
 import type { ReckonedPoint, Reckoning } from './reckoning.ts';
-import { chooseZones, joinCost, zoneCosts } from './zone-choice.ts';
-import type { ZoneChoice, ZoneCosts } from './zone-choice.ts';
+import { chooseZones } from './zone-choice.ts';
+import type { ZoneChoice } from './zone-choice.ts';
+import { joinCost, zoneCosts } from './zone-costs.ts';
+import type { ZoneCosts } from './zone-costs.ts';
 
 /** The version of the engine, kept beside every answer. */
 export const ENGINE_VERSION = '1.0.0';
@@ -159,10 +161,11 @@ function pointsCost(reckoning: Reckoning, positions: readonly number[]): number 
 }
 
 function costOf(reckoning: Reckoning, positions: readonly number[]): number {
-  const { parents } = reckoning.garment;
+  const { parents, weights } = reckoning.garment;
   let cost = pointsCost(reckoning, positions);
   for (let zone = 1; zone < positions.length; zone++) {
-    cost += joinCost(Math.abs((positions[zone] ?? 0) - (positions[parents[zone] ?? 0] ?? 0)));
+    const apart = Math.abs((positions[zone] ?? 0) - (positions[parents[zone] ?? 0] ?? 0));
+    cost += (weights[zone] ?? 1) * joinCost(apart);
   }
   return cost;
 }

@@ -2,7 +2,7 @@ import { TIE } from './constants.ts';
 import type { FitInput, Reason } from './fit.schema.ts';
 import { bestSize, pointCost } from './governors.ts';
 import type { ReckonedPoint, Reckoning } from './reckoning.ts';
-import type { ZoneCosts } from './zone-choice.ts';
+import type { ZoneCosts } from './zone-costs.ts';
 
 /**
  * Why each zone has its size, from neck to hem: what governs, what was given up for an easier cut, where the floor or a

@@ -1,6 +1,5 @@
 import { MEASURES } from '../points/measures.ts';
 import {
-  ALTERED_BEYOND,
   FLOOR_SHARE_OF_BODY,
   STEP_LEAST_TAPE_ERRORS,
   STEP_ONE_SIZE_GIRTH_MM,
@@ -14,6 +13,8 @@ import type { ReckonedPoint, Reckoning } from './reckoning.ts';
 /** Fills in deviation, step, half-width, floor and costs of a point at every size; its columns must have been read. */
 export function reckonSizes(input: FitInput, reckoning: Reckoning, point: ReckonedPoint): void {
   const { chartLow, chartHigh, finished, sizes } = reckoning;
+  const { deviation: deviations, step: steps, half: halves, floor: floors } = reckoning;
+  const { deviationCost: deviationCosts, floorCost: floorCosts } = reckoning;
   const { spec, at, bodyMm, chooses, case: found } = point;
   const { wearingMm, targetMm } = spec;
   const isSewn = found === 'finished' || found === 'noTarget';
@@ -24,6 +25,7 @@ export function reckonSizes(input: FitInput, reckoning: Reckoning, point: Reckon
   // says nothing of the draft. Where a table has no value, NaN runs through every figure that would need it.
   const carriesDraft =
     found !== 'falls' && (input.garment.draftedStretch ?? 0) <= (input.fabric.stretch ?? 0);
+  const floorWeight = WEIGHT_FLOOR * spec.share;
   const leastStep = leastStepMm(point, sizes);
   let before = NaN;
   let here = sizeMm(reckoning, at, isSewn);
@@ -43,12 +45,12 @@ export function reckonSizes(input: FitInput, reckoning: Reckoning, point: Reckon
     const half = halfWidth(step, hasDraft ? sewn - here : isSewn ? targetMm : NaN, floor, bodyMm);
     const share = deviation / half;
     const missing = (floor - sewn + bodyMm) / step;
-    reckoning.deviation[i] = deviation;
-    reckoning.step[i] = step;
-    reckoning.half[i] = half;
-    reckoning.floor[i] = spec.floorBinds ? floor : NaN;
-    reckoning.deviationCost[i] = chooses ? deviationCost(spec, share) : 0;
-    reckoning.floorCost[i] = floorActs && missing > 0 ? WEIGHT_FLOOR * missing * missing : 0;
+    deviations[i] = deviation;
+    steps[i] = step;
+    halves[i] = half;
+    floors[i] = spec.floorBinds ? floor : NaN;
+    deviationCosts[i] = chooses ? deviationCost(spec, share) : 0;
+    floorCosts[i] = floorActs && missing > 0 ? floorWeight * missing * missing : 0;
     before = here;
     here = next;
   }
@@ -76,10 +78,8 @@ function halfWidth(step: number, target: number, floor: number, bodyMm: number):
 }
 
 /** What a deviation of so many half-widths costs. */
-function deviationCost({ role, weight, isAltered }: FitPoint, share: number): number {
-  const size = share < 0 ? -share : share;
-  if (role === 'loose') return size > 1 ? weight * (size - 1) * (size - 1) : 0;
-  if (!isAltered || size <= ALTERED_BEYOND) return weight * size * size;
-  // Goes on as a straight line where the square stops, without a corner.
-  return weight * ALTERED_BEYOND * (2 * size - ALTERED_BEYOND);
+function deviationCost({ role, weight }: FitPoint, share: number): number {
+  if (role !== 'loose') return weight * share * share;
+  const beyond = (share < 0 ? -share : share) - 1;
+  return beyond > 0 ? weight * beyond * beyond : 0;
 }

@@ -42,26 +42,8 @@ const SENTENCES: Record<CautionCode, Entry> = {
     tone: 'missing',
     say: () => 'Closer or roomier by choice is not reckoned yet: the plan aims at the draft.',
   },
-  beyondLargest: {
-    tone: 'watch',
-    say: (cautions, context) =>
-      `This pattern’s sizes end at ${context.sizes.at(-1) ?? 'the last'}: ${each(
-        cautions,
-        context,
-        (name, amount) =>
-          amount === null ? `the ${name} is beyond it` : `the ${name} is ${amount} beyond it`,
-      )}.`,
-  },
-  beyondSmallest: {
-    tone: 'watch',
-    say: (cautions, context) =>
-      `This pattern’s sizes begin at ${context.sizes[0] ?? 'the first'}: ${each(
-        cautions,
-        context,
-        (name, amount) =>
-          amount === null ? `the ${name} is before it` : `the ${name} is ${amount} before it`,
-      )}.`,
-  },
+  beyondLargest: { tone: 'watch', say: (cautions, context) => sayEnd(cautions, context, 'largest') },
+  beyondSmallest: { tone: 'watch', say: (cautions, context) => sayEnd(cautions, context, 'smallest') },
   belowFloor: {
     tone: 'watch',
     say: (cautions, context) =>
@@ -120,6 +102,21 @@ const SENTENCES: Record<CautionCode, Entry> = {
   },
 };
 
+/** Beyond the first or the last size; a pattern of one size has no ends, only the body it is drafted for. */
+function sayEnd(cautions: readonly Caution[], context: SayContext, end: 'largest' | 'smallest'): string {
+  const isLargest = end === 'largest';
+  const label = context.sizes.at(isLargest ? -1 : 0) ?? 'the last';
+  const side = context.sizes.length === 1 ? (isLargest ? 'more' : 'less') : isLargest ? 'beyond' : 'before';
+  const than = context.sizes.length === 1 ? `than ${label} is drafted for` : 'it';
+  const said = each(
+    cautions,
+    context,
+    (name, amount) => `the ${name} is ${amount === null ? '' : `${amount} `}${side} ${than}`,
+  );
+  if (context.sizes.length === 1) return `${capital(said)}.`;
+  return `This pattern’s sizes ${isLargest ? 'end' : 'begin'} at ${label}: ${said}.`;
+}
+
 /** What to know about a plan, one sentence a code, the weightiest first. No cautions give an empty list. */
 export function sayCautions(cautions: readonly Caution[], context: SayContext): Said[] {
   return codes().flatMap((code) => {
@@ -150,7 +147,10 @@ export function sayBorderline(points: readonly PointResult[], context: SayContex
 
 function sayTape(close: readonly PointResult[], context: SayContext): string {
   const leewayMm = close.length === 1 ? (close[0]?.leewayMm ?? null) : null;
-  if (leewayMm === null) return 'it lies so near wearing ease that the tape alone could decide';
+  if (leewayMm === null) {
+    const lie = close.length === 1 ? 'it lies' : 'they lie';
+    return `${lie} so near wearing ease that the tape alone could decide`;
+  }
   const amount = printLengthWithUnit(Math.abs(leewayMm), context.unit);
   return leewayMm < 0
     ? `${amount} is no more than a tape can be out`

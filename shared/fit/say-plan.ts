@@ -49,19 +49,19 @@ function sayRuns(first: Run, rest: readonly Run[], context: SayContext): string 
     first.zones.length === 1
       ? `${first.label} at the ${zoneWord(first.zones[0])}`
       : `${first.label} to the ${zoneWord(first.zones.at(-1))}`;
-  const steps: string[] = [];
-  let before = first;
-  let verbBefore = '';
+  // Steps in the same direction share their verb: run out to 14 at the waist and 16 from the hip down.
+  const steps: { verb: string; places: string[] }[] = [];
   rest.forEach((run, index) => {
+    const before = rest[index - 1] ?? first;
     const verb = run.position > before.position ? 'run out' : 'come in';
-    const place = sayPlace(run, index === rest.length - 1, zoneWord);
-    if (verb === verbBefore) steps.push(`${steps.pop() ?? ''} and to ${run.label} ${place}`);
-    else steps.push(`${verb} to ${run.label} ${place}`);
-    verbBefore = verb;
-    before = run;
+    const place = `${run.label} ${sayPlace(run, index === rest.length - 1, zoneWord)}`;
+    const last = steps.at(-1);
+    if (last?.verb === verb) last.places.push(place);
+    else steps.push({ verb, places: [place] });
   });
-  const last = steps.pop() ?? '';
-  return `${[start, ...steps].join(', ')}, then ${last}`;
+  const said = steps.map(({ verb, places }) => `${verb} to ${listWords(places)}`);
+  const end = said.pop() ?? '';
+  return `${[start, ...said].join(', ')}, then ${end}`;
 }
 
 function sayPlace(run: Run, isLast: boolean, zoneWord: (zone: ZoneId | undefined) => string): string {

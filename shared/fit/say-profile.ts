@@ -23,8 +23,8 @@ export function sayProfile(
   const print = (mm: number) => printLengthWithUnit(mm, context.unit);
   const range =
     known.length === 1
-      ? `At the ${name}, ${first.label} leaves ${print(first.mm)} of ease.`
-      : `At the ${name}, ease runs from ${print(first.mm)} in ${first.label} to ${print(last.mm)} in ${last.label}.`;
+      ? `At the ${name}, size ${first.label} leaves ${print(first.mm)} of ease.`
+      : `At the ${name}, ease runs from ${print(first.mm)} at size ${first.label} to ${print(last.mm)} at size ${last.label}.`;
   if (floorMm === null) return range;
   const enough = known.find((size) => size.mm >= floorMm);
   const words = `wearing ease (${print(floorMm)})`;

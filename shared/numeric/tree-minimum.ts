@@ -12,6 +12,8 @@ export interface TreeProblem {
   limits: readonly number[];
   /** The cost of neighbours lying so many states apart, by distance; none for 0. */
   joinCosts: readonly number[];
+  /** For each node, what its join to its parent weighs (the first node's is not looked at). */
+  joinWeights: readonly number[];
   /** What each state beyond a limit costs; Infinity keeps every limit. */
   overLimit: number;
   /** Costs closer than this are equal, and then the larger state is taken. */
@@ -80,9 +82,10 @@ function startWork(problem: TreeProblem, nodes: number): Work {
 
 /** Settles, for every state of the parent, what the best state of the child is, and adds it to the parent. */
 function settleEdge(problem: TreeProblem, work: Work, node: number): void {
-  const { states, tie, overLimit } = problem;
-  const { same, mixed } = work;
+  const { states, tie, overLimit, joinCosts } = problem;
+  const { same, mixed, anyState, mixedState, fromChild } = work;
   const limit = problem.limits[node] ?? 0;
+  const weight = problem.joinWeights[node] ?? 0;
   const window = overLimit === Infinity ? limit : states;
   const child = node * states;
   const parent = (problem.parents[node] ?? 0) * states;
@@ -99,7 +102,7 @@ function settleEdge(problem: TreeProblem, work: Work, node: number): void {
       let differing = b;
       if (t !== s) {
         const apart = t > s ? t - s : s - t;
-        whole += problem.joinCosts[apart] as number;
+        whole += weight * (joinCosts[apart] as number);
         if (apart > limit) whole += overLimit * (apart - limit);
         differing = whole;
       }
@@ -112,12 +115,12 @@ function settleEdge(problem: TreeProblem, work: Work, node: number): void {
         if (differing < bestMixed) bestMixed = differing;
       }
     }
-    work.anyState[child + s] = bestState;
-    work.mixedState[child + s] = bestMixedState;
+    anyState[child + s] = bestState;
+    mixedState[child + s] = bestMixedState;
     const at = parent + s;
     const before = (mixed[at] as number) + best;
     const here = (same[at] as number) + bestMixed;
-    work.fromChild[child + s] = here < before;
+    fromChild[child + s] = here < before;
     mixed[at] = here < before ? here : before;
     same[at] = (same[at] as number) + (same[child + s] as number);
   }

@@ -109,4 +109,3 @@ export const importDraftSummarySchema = importDraftSchema.pick({
   updatedAt: true,
   details: true,
 });
-export type ImportDraftSummary = z.infer<typeof importDraftSummarySchema>;

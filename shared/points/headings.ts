@@ -81,7 +81,7 @@ const FLAT_WORDS = new Set(['half', 'flat', 'halfwidth', 'pit', 'folded']);
  * and units do not matter. Empty or unknown headings answer `none`; it never guesses between two points and never throws.
  */
 export function matchHeading(heading: string, table: HeadingTable | null = null): HeadingMatch {
-  const { text, unit } = takeUnit(plain(heading).slice(0, 200));
+  const { text, unit } = takeUnit(plain(heading));
   const words = wordsOf(text);
   const says = words.some((word) => SAYS_FINISHED.has(word))
     ? 'finished'
@@ -162,7 +162,8 @@ function looselyMatched(text: string, bare: readonly string[]): PointId | null {
 }
 
 function plain(text: string): string {
-  return text.replace(/½/g, '1/2').normalize('NFKC').replace(/^'+/, '').trim();
+  // No heading is longer; what is may be a whole file in one cell.
+  return text.slice(0, 200).replace(/½/g, '1/2').normalize('NFKC').replace(/^'+/, '').trim();
 }
 
 function takeUnit(text: string): { text: string; unit: LengthUnit | null } {

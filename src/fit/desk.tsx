@@ -17,7 +17,7 @@ import { readHeld, writeHeld } from './fit-address.ts';
 import { FitView } from './parts/fit-view.tsx';
 import { groundOf, planHeld, type Held } from './parts/fitting.ts';
 import { ProfileSection } from './parts/profile-section.tsx';
-import { Fast, Setting, SilhouetteWord } from './parts/setting.tsx';
+import { Fast, Setting, SilhouetteWord, WithComma } from './parts/setting.tsx';
 import { SavePlan } from './save-plan.tsx';
 import { saysTheSame } from './same-plan.ts';
 import { MeasuredWord, PatternWord, PersonWord, useSettingChange } from './setting-choosers.tsx';
@@ -41,14 +41,25 @@ export function Desk({ setId, revisionId, silhouette, hold }: DeskProps) {
   return (
     <>
       <Setting>
-        <PersonWord person={person} />, measured <MeasuredWord set={set} />, in the{' '}
-        <PatternWord pattern={pattern} />,{' '}
-        <SilhouetteWord
-          value={silhouette ?? pattern.silhouette}
-          drafted={pattern.silhouette}
-          onChange={(next) => change({ silhouette: next === pattern.silhouette ? null : next })}
-        />
-        , of <Fast>woven cloth</Fast>
+        <WithComma>
+          <PersonWord person={person} />
+        </WithComma>{' '}
+        measured{' '}
+        <WithComma>
+          <MeasuredWord set={set} />
+        </WithComma>{' '}
+        in the{' '}
+        <WithComma>
+          <PatternWord pattern={pattern} />
+        </WithComma>{' '}
+        <WithComma>
+          <SilhouetteWord
+            value={silhouette ?? pattern.silhouette}
+            drafted={pattern.silhouette}
+            onChange={(next) => change({ silhouette: next === pattern.silhouette ? null : next })}
+          />
+        </WithComma>{' '}
+        of <Fast>woven cloth</Fast>
       </Setting>
       {revision.id !== pattern.latestRevisionId && (
         <p className="mt-2 text-note text-ink-2">
@@ -130,9 +141,9 @@ function Reckoned({ answer, request, speech, hold, name }: ReckonedProps) {
         isPage
         actions={
           plan.zones.length > 0 && (
-            <div className="mt-5 flex flex-wrap items-start gap-x-6 gap-y-2 print:hidden">
-              <SavePlan request={{ ...request, options }} name={name} isReady={isCurrent} />
+            <div className="flex flex-wrap items-start gap-x-6 gap-y-2 print:hidden">
               <Confirmation state={state} engine={answer.engine} onRetry={() => void server.refetch()} />
+              <SavePlan request={{ ...request, options }} name={name} isReady={isCurrent} />
             </div>
           )
         }

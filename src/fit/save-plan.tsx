@@ -36,15 +36,15 @@ export function SavePlan({ request, name, isReady }: SavePlanProps) {
     );
   }
   return (
-    <div className="flex flex-wrap items-center gap-x-5">
+    <div className="flex flex-wrap items-center">
       <Button kind="primary" disabled={!isReady} onClick={() => setOpen(true)}>
         {save.isSuccess ? 'Save as another plan' : 'Save this plan'}
       </Button>
       <p role="status">
         {save.isSuccess && (
-          <>
+          <span className="ml-5">
             Saved. <TextLink to={paths.plan(save.data.id)}>Open {save.data.name}</TextLink>
-          </>
+          </span>
         )}
       </p>
     </div>

@@ -39,7 +39,7 @@ export function PersonWord({ person }: { person: Person | null }) {
   return (
     <SentenceSelect
       label="Person"
-      placeholder="choose somebody"
+      placeholder="somebody"
       value={person?.id ?? ''}
       options={options}
       onChange={(personId) => {
@@ -89,7 +89,7 @@ export function PatternWord({ pattern }: PatternWordProps) {
   return (
     <SentenceSelect
       label="Pattern"
-      placeholder="choose a pattern"
+      placeholder="a pattern"
       value={pattern?.id ?? ''}
       options={options}
       onChange={(patternId) => {

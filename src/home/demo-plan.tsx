@@ -4,7 +4,7 @@ import { buildFitInput } from '../../shared/fit/build-fit-input.ts';
 import type { Silhouette } from '../../shared/fit/fit-words.ts';
 import { FitView } from '../fit/parts/fit-view.tsx';
 import { groundOf, planHeld, type Held } from '../fit/parts/fitting.ts';
-import { Fast, Setting, SilhouetteWord } from '../fit/parts/setting.tsx';
+import { Fast, Setting, SilhouetteWord, WithComma } from '../fit/parts/setting.tsx';
 import { printDay } from '../ui/day.ts';
 import { SentenceSelect } from '../ui/sentence-select.tsx';
 
@@ -36,31 +36,40 @@ export function DemoPlan() {
   return (
     <>
       <Setting>
-        <SentenceSelect
-          label="Person"
-          value={String(personAt)}
-          options={frontPagePeople.map(({ name }, index) => ({ value: String(index), label: name }))}
-          onChange={(value) => change(() => setPersonAt(Number(value)))}
-        />
-        , measured <Fast>{printDay(person.takenOn)}</Fast>, in the{' '}
-        <SentenceSelect
-          label="Pattern"
-          value={String(patternAt)}
-          options={frontPagePatterns.map(({ title }, index) => ({ value: String(index), label: title }))}
-          onChange={(value) =>
-            change(() => {
-              setPatternAt(Number(value));
-              setSilhouette(null);
-            })
-          }
-        />
-        ,{' '}
-        <SilhouetteWord
-          value={silhouette ?? chosen.pattern.silhouette}
-          drafted={chosen.pattern.silhouette}
-          onChange={(next) => change(() => setSilhouette(next))}
-        />
-        , of <Fast>woven cloth</Fast>
+        <WithComma>
+          <SentenceSelect
+            label="Person"
+            value={String(personAt)}
+            options={frontPagePeople.map(({ name }, index) => ({ value: String(index), label: name }))}
+            onChange={(value) => change(() => setPersonAt(Number(value)))}
+          />
+        </WithComma>{' '}
+        measured{' '}
+        <WithComma>
+          <Fast>{printDay(person.takenOn)}</Fast>
+        </WithComma>{' '}
+        in the{' '}
+        <WithComma>
+          <SentenceSelect
+            label="Pattern"
+            value={String(patternAt)}
+            options={frontPagePatterns.map(({ title }, index) => ({ value: String(index), label: title }))}
+            onChange={(value) =>
+              change(() => {
+                setPatternAt(Number(value));
+                setSilhouette(null);
+              })
+            }
+          />
+        </WithComma>{' '}
+        <WithComma>
+          <SilhouetteWord
+            value={silhouette ?? chosen.pattern.silhouette}
+            drafted={chosen.pattern.silhouette}
+            onChange={(next) => change(() => setSilhouette(next))}
+          />
+        </WithComma>{' '}
+        of <Fast>woven cloth</Fast>
       </Setting>
       <FitView ground={ground} plan={plan} held={held} onHeld={setHeld} headingLevel={2} />
     </>

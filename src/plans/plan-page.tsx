@@ -155,7 +155,7 @@ function Since({ saved, person, pattern }: { saved: SavedPlan; person: Person; p
   ];
   const search = new URLSearchParams({ set: setId, revision: pattern.latestRevisionId });
   return (
-    <div className="mt-5 text-note text-ink-2">
+    <div className="text-note text-ink-2">
       <p>
         Saved {printDay(saved.createdAt.slice(0, 10))}, by engine {saved.engine}
         {saved.engine === ENGINE_VERSION ? '' : ` (today’s is ${ENGINE_VERSION})`}. It stays as it was.

@@ -43,11 +43,15 @@ export function ChoiceList({ label, hint, error, choices, id, className, ...inpu
               // The list's own id leads to its first choice, so that a link from a summary can land here.
               id={index === 0 ? listId : `${listId}-${choice.value}`}
               value={choice.value}
+              // The words are in the label so that a touch on them chooses; the name is the choice alone.
+              aria-labelledby={`${listId}-${choice.value}-name`}
               aria-describedby={`${listId}-${choice.value}-hint`}
               aria-invalid={error === undefined ? undefined : true}
               className="size-5 shrink-0 translate-y-1 accent-woad"
             />
-            <span className="font-medium">{choice.label}</span>
+            <span id={`${listId}-${choice.value}-name`} className="font-medium">
+              {choice.label}
+            </span>
             <span
               id={`${listId}-${choice.value}-hint`}
               className="col-start-2 text-note text-ink-2 sm:col-start-3"

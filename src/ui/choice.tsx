@@ -70,20 +70,3 @@ export function RadioGroup({
     </fieldset>
   );
 }
-
-/** Yes or no. */
-export function Checkbox({
-  label,
-  hint,
-  ...input
-}: ComponentProps<'input'> & { label: ReactNode; hint?: ReactNode }) {
-  return (
-    <label className="flex min-h-11 items-center gap-2.5">
-      <input {...input} type="checkbox" className={MARK} />
-      <span>
-        {label}
-        {hint !== undefined && <span className="block text-small text-ink-2">{hint}</span>}
-      </span>
-    </label>
-  );
-}

@@ -2,7 +2,6 @@ import { beforeAll, describe, expect, it } from 'vitest';
 import { testApp, type SignedIn, type TestApp } from '../support/app.ts';
 import {
   bring,
-  bytesKept,
   CHART,
   DETAILS,
   draftOf,

@@ -200,20 +200,28 @@ describe('cape', () => {
 });
 
 describe('shirt', () => {
-  it('chest 100 cm, neck 43 cm: the chest rules the shoulder, neckline and collar go up together, since a collar is drafted to its neckline', () => {
-    const sizes = [96, 100, 104, 108, 112].map((chest, size) => ({
-      label: String(38 + size),
-      body: { bust: 10 * chest, neck: 380 + 10 * size },
-      finished: {},
-    }));
-    const plan = planFit(
-      fitInput({ kind: 'shirt', silhouette: 'semiFitted' }, sizes, { bust: 1000, neck: 430 }),
-    );
-    expect(labels(plan)).toMatchObject({ shoulder: '39', sleeve: '39', bust: '39', waist: '39' });
-    expect(Number(labels(plan).neck)).toBeGreaterThan(39);
-    expect(plan.blends).toHaveLength(1);
-    expect(plan.blends[0]).toMatchObject({ fromZone: 'shoulder', toZone: 'neck', point: 'neck' });
-  });
+  // Charts on which the neck of 43 cm lies two, three and four sizes above the chest of 100 cm.
+  it.each([41, 40, 39])(
+    'chest 100 cm, neck 43 cm: the chest rules the shoulder, neckline and collar go up together, since a collar is drafted to its neckline (neck %d at chest 100)',
+    (neckAt100) => {
+      const sizes = [92, 96, 100, 104, 108, 112, 116].map((chest, size) => ({
+        label: String(36 + size),
+        body: { bust: 10 * chest, neck: 10 * (neckAt100 - 2 + size) },
+        finished: {},
+      }));
+      const garment = { kind: 'shirt', silhouette: 'semiFitted' } as const;
+      const plan = planFit(fitInput(garment, sizes, { bust: 1000, neck: 430 }));
+      expect(labels(plan)).toMatchObject({
+        shoulder: '38',
+        sleeve: '38',
+        bust: '38',
+        waist: '38',
+        neck: '40',
+      });
+      expect(plan.blends).toHaveLength(1);
+      expect(plan.blends[0]).toMatchObject({ fromZone: 'shoulder', toZone: 'neck', point: 'neck' });
+    },
+  );
 });
 
 describe('an own garment measured flat', () => {

@@ -6,6 +6,10 @@ const RULES = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-pra
 
 /** What an automatic check finds against WCAG 2.2 AA, in both colour schemes: nothing. */
 export async function expectAccessible(page: Page): Promise<void> {
+  const viewport = page.viewportSize();
+  // A window as tall as the page, so that what sticks to its edge covers nothing but where it really stands.
+  const height = await page.evaluate(() => document.documentElement.scrollHeight);
+  if (viewport) await page.setViewportSize({ ...viewport, height: Math.max(viewport.height, height) });
   for (const colorScheme of ['light', 'dark'] as const) {
     await page.emulateMedia({ colorScheme });
     const { violations } = await new AxeBuilder({ page }).withTags(RULES).analyze();
@@ -16,4 +20,5 @@ export async function expectAccessible(page: Page): Promise<void> {
     }));
     expect(found, `${page.url()} in ${colorScheme}`).toEqual([]);
   }
+  if (viewport) await page.setViewportSize(viewport);
 }

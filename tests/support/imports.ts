@@ -52,8 +52,8 @@ export async function bring(
   const { id } = await start(by, { details: { ...DETAILS, ...details } });
   if (chart !== '') await upload(by, id, 'chart', chart, 'chart.csv');
   if (finished !== '') await upload(by, id, 'finished', finished, 'finished.csv');
-  const { body } = await by.agent.post(`/api/imports/${id}/commit`).expect(201);
-  const { patternId } = body as { patternId: string };
+  const committed = await by.agent.post(`/api/imports/${id}/commit`).expect(201);
+  const { patternId } = committed.body as { patternId: string };
   return patternSchema.parse((await by.agent.get(`/api/patterns/${patternId}`).expect(200)).body);
 }
 

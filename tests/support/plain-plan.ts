@@ -10,13 +10,13 @@ interface PlainPoint {
   leastStep: number;
   wearing: number | null;
   target: number | null;
-  /** Beyond half a size its vote grows evenly only. */
-  even: boolean;
+  /** Neck and sleeve hang on the shoulder: they and their joins count for little in the whole; a width for a tenth. */
+  share: number;
 }
 
 const IN = 25.4;
 const POINTS: PlainPoint[] = [
-  { point: 'neck', zone: 'neck', weight: 1, leastStep: 10, wearing: null, target: null, even: true },
+  { point: 'neck', zone: 'neck', weight: 1, leastStep: 10, wearing: null, target: null, share: 1e-3 },
   {
     point: 'upperBust',
     zone: 'shoulder',
@@ -24,21 +24,22 @@ const POINTS: PlainPoint[] = [
     leastStep: 20,
     wearing: null,
     target: null,
-    even: false,
+    share: 1,
   },
-  { point: 'upperArm', zone: 'sleeve', weight: 1, leastStep: 10, wearing: 2 * IN, target: null, even: true },
-  { point: 'bust', zone: 'bust', weight: 2, leastStep: 20, wearing: 1.5 * IN, target: 3.5 * IN, even: false },
-  { point: 'waist', zone: 'waist', weight: 1, leastStep: 20, wearing: 0.75 * IN, target: null, even: false },
-  { point: 'hip', zone: 'hip', weight: 1, leastStep: 20, wearing: 2 * IN, target: null, even: false },
+  { point: 'backWidth', zone: 'shoulder', weight: 1, leastStep: 10, wearing: null, target: null, share: 0.1 },
+  { point: 'upperArm', zone: 'sleeve', weight: 1, leastStep: 10, wearing: 2 * IN, target: null, share: 1e-3 },
+  { point: 'bust', zone: 'bust', weight: 2, leastStep: 20, wearing: 1.5 * IN, target: 3.5 * IN, share: 1 },
+  { point: 'waist', zone: 'waist', weight: 1, leastStep: 20, wearing: 0.75 * IN, target: null, share: 1 },
+  { point: 'hip', zone: 'hip', weight: 1, leastStep: 20, wearing: 2 * IN, target: null, share: 1 },
 ];
-const JOINS: [ZoneId, ZoneId, number][] = [
-  ['shoulder', 'neck', 2],
-  ['shoulder', 'sleeve', 1],
-  ['shoulder', 'bust', 1],
-  ['bust', 'waist', 2],
-  ['waist', 'hip', 3],
+const JOINS: [from: ZoneId, to: ZoneId, limit: number, share: number][] = [
+  ['shoulder', 'neck', 2, 1e-3],
+  ['shoulder', 'sleeve', 1, 1e-3],
+  ['shoulder', 'bust', 1, 1],
+  ['bust', 'waist', 2, 1],
+  ['waist', 'hip', 3, 1],
 ];
-const ZONES = POINTS.map(({ zone }) => zone);
+const ZONES = [...new Set(POINTS.map(({ zone }) => zone))];
 
 /** The point ids that the plain plan knows. */
 export const PLAIN_POINTS = POINTS.map(({ point }) => point);
@@ -66,9 +67,9 @@ export function plainLeastCost(input: FitInput): number | null {
     >;
     if (!follows(speaks, at)) continue;
     let cost = 0;
-    for (const [from, to, limit] of JOINS) {
+    for (const [from, to, limit, share] of JOINS) {
       const apart = Math.abs(at[from] - at[to]);
-      cost += apart > limit ? Infinity : apart === 0 ? 0 : 0.6 + 0.2 * apart ** 2;
+      cost += apart > limit ? Infinity : apart === 0 ? 0 : share * (0.6 + 0.2 * apart ** 2);
     }
     if (cost >= least) continue;
     measured.forEach(({ zone }, index) => (cost += costs[index]?.[at[zone]] ?? NaN));
@@ -77,11 +78,10 @@ export function plainLeastCost(input: FitInput): number | null {
   return least;
 }
 
-/** A zone without a point follows: neck, sleeve and shoulder the trunk, waist and hip the zone that leads to them. */
+/** A zone at an end without a point follows the zone that leads to it. */
 function follows(speaks: ReadonlySet<ZoneId>, at: Record<ZoneId, number>): boolean {
   if (!speaks.has('neck') && at.neck !== at.shoulder) return false;
   if (!speaks.has('sleeve') && at.sleeve !== at.shoulder) return false;
-  if (!speaks.has('shoulder') && at.shoulder !== at.bust) return false;
   if (!speaks.has('hip') && at.hip !== at.waist) return false;
   return speaks.has('waist') || speaks.has('hip') || at.waist === at.bust;
 }
@@ -118,9 +118,8 @@ function plainCost(input: FitInput, plain: PlainPoint, s: number): number {
   const aim = meant ?? (chart === undefined ? target : null);
   const half = aim === null ? step / 2 : Math.max(step, aim - Math.max(floor ?? 0, -0.05 * body)) / 2;
   const share = Math.abs(deviation ?? 0) / half;
-  const off = plain.even && share > 1 ? 2 * share - 1 : share ** 2;
   const missing = floor === null || garment === undefined ? 0 : Math.max(0, floor - (garment - body));
-  return plain.weight * off + 20 * (missing / step) ** 2;
+  return plain.share * (plain.weight * share ** 2 + 20 * (missing / step) ** 2);
 }
 
 function* assignments(states: number): Generator<number[]> {

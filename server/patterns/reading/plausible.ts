@@ -1,3 +1,4 @@
+import type { TableRole } from '../../../shared/patterns/imports.schema.ts';
 import type { PointId } from '../../../shared/points/point-ids.ts';
 
 /**
@@ -43,14 +44,23 @@ const PLAUSIBLE: Partial<Record<PointId, { all: [number, number]; most: [number,
   hemGirth: { all: [300, 4000], most: [800, 2600] },
 };
 
-/** How well lengths in mm suit a point: the share that could be, and half as much again for those usual in grown people; null where nothing is known. */
+/** How much longer than a body's a garment's length may be: a cape or a full skirt at the hip. */
+const GARMENT_SHARE = 1.6;
+
+/**
+ * How well lengths in mm suit a point: the share that could be, and half as much again for those usual in grown people; null
+ * where nothing is known.
+ */
 export function howPlausible(
   point: PointId,
   lengths: readonly number[],
+  role: TableRole,
 ): { share: number; score: number } | null {
   const range = PLAUSIBLE[point];
   if (!range || lengths.length === 0) return null;
-  const within = ([low, high]: [number, number]) => lengths.filter((mm) => mm >= low && mm <= high).length;
+  const most = role === 'finished' ? GARMENT_SHARE : 1;
+  const within = ([low, high]: [number, number]) =>
+    lengths.filter((mm) => mm >= low && mm <= high * most).length;
   const share = within(range.all) / lengths.length;
   return { share, score: share + within(range.most) / lengths.length / 2 };
 }

@@ -117,7 +117,7 @@ function fromNumbers(evidence: UnitEvidence): TableUnit {
 function suits(evidence: UnitEvidence, unit: LengthUnit): { score: number } {
   const scores = evidence.columns.flatMap((column, at) => {
     if (column.point === null) return [];
-    const found = howPlausible(column.point, lengthsIn(evidence, at, unit));
+    const found = howPlausible(column.point, lengthsIn(evidence, at, unit), evidence.role);
     return found ? [found.score] : [];
   });
   return { score: scores.reduce((sum, score) => sum + score, 0) };
@@ -177,7 +177,8 @@ function sayColumns(
 }
 
 function betterUnits(evidence: UnitEvidence, at: number, point: PointId, own: LengthUnit): LengthUnit[] {
-  const share = (unit: LengthUnit) => howPlausible(point, lengthsIn(evidence, at, unit))?.share ?? null;
+  const share = (unit: LengthUnit) =>
+    howPlausible(point, lengthsIn(evidence, at, unit), evidence.role)?.share ?? null;
   const owned = share(own);
   if (owned === null || owned > 0.5) return [];
   return LENGTH_UNITS.filter((unit) => unit !== own && (share(unit) ?? 0) >= 0.9);

@@ -15,7 +15,12 @@ export function writeCsv(table: PatternTable, role: TableRole): string {
   const rows = table.sizes.map((label, at) => [label, ...columns.map((column) => column.typed[at] ?? '')]);
   const guarded = [headings, ...rows].map((row) => row.map(guardText));
   // The mark in front tells spreadsheets that the file is UTF-8, so that ⅜ comes through.
-  return `\uFEFF${Papa.unparse(guarded, { newline: '\r\n' })}\r\n`;
+  return `\uFEFF${Papa.unparse(guarded, { newline: '\r\n', quotes: couldDelimit })}\r\n`;
+}
+
+/** A semicolon or a tab would need no quotation marks here, but bare ones could be taken for the delimiter. */
+function couldDelimit(text: unknown): boolean {
+  return typeof text === 'string' && /[;\t]/.test(text);
 }
 
 function headingOf({ heading, point, unit }: ChartColumn | FinishedColumn, role: TableRole): string {

@@ -1,7 +1,7 @@
 import type { PointResult } from '../../../shared/fit/fit.schema.ts';
 import type { EaseDomain } from './ease-scale.ts';
 import { fillOf } from './fills.tsx';
-import { placeLabels, textWidth, type Taken } from './place-labels.ts';
+import { placeLabels, textWidth } from './place-labels.ts';
 
 interface EaseBarProps {
   result: PointResult;
@@ -15,6 +15,8 @@ interface EaseBarProps {
 }
 
 const TICK_FONT = 12;
+/** Two hundred sizes would make a bar of ticks: nearer than this, one is left out. */
+const LEAST_APART_PX = 4;
 
 /** The room at one point: body 0, floor, drafted ease, the cloth at the chosen size, and the other sizes faintly. */
 export function EaseBar({ result, ladder, sizes, domain, width, height, fillId }: EaseBarProps) {
@@ -90,11 +92,12 @@ interface OtherSizesProps {
 }
 
 function OtherSizes({ ladder, sizes, chosen, toX, width, top, taken }: OtherSizesProps) {
-  const line: Taken = { from: 0, to: width };
-  const ticks = ladder.flatMap((mm, position) => {
-    if (mm === null || position === chosen) return [];
+  const ticks: { position: number; x: number; label: string }[] = [];
+  ladder.forEach((mm, position) => {
+    if (mm === null || position === chosen) return;
     const x = toX(mm);
-    return x < line.from || x > line.to ? [] : [{ position, x, label: sizes[position] ?? '' }];
+    const isCrowded = Math.abs(x - (ticks.at(-1)?.x ?? -Infinity)) < LEAST_APART_PX;
+    if (x >= 0 && x <= width && !isCrowded) ticks.push({ position, x, label: sizes[position] ?? '' });
   });
   const placed = labelsPlaced(ticks, chosen, taken, width);
   return (
@@ -126,5 +129,5 @@ function labelsPlaced(
     rank: Math.abs(position - chosen),
   }));
   const marks = taken.map((x) => ({ from: x - 2, to: x + 2 }));
-  return placeLabels(wanted, marks, { from: 0, to: width });
+  return placeLabels(wanted, marks, { from: 0, to: width }, 8);
 }

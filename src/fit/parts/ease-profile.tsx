@@ -10,8 +10,8 @@ import {
   YAxis,
 } from 'recharts';
 import type { PointResult } from '../../../shared/fit/fit.schema.ts';
-import { printLength } from '../../../shared/units.ts';
 import type { SayContext } from '../../../shared/fit/say-words.ts';
+import { easeDomain, easeTicks } from './ease-scale.ts';
 
 interface EaseProfileProps {
   result: PointResult;
@@ -19,6 +19,7 @@ interface EaseProfileProps {
   context: SayContext;
 }
 
+const HEIGHT = 300;
 const TICK = { fontSize: 13, fill: 'var(--ink-2)' };
 
 /** One point's ease in every size: the cloth's dashed line over the body's solid one, the room between them filled. */
@@ -30,6 +31,8 @@ export function EaseProfile({ result, ladder, context }: EaseProfileProps) {
     mm,
     room: mm === null || mm < (floorMm ?? 0) ? null : [floorMm ?? 0, mm],
   }));
+  const domain = easeDomain([...ladder, floorMm]);
+  const ticks = easeTicks(domain, HEIGHT, context.unit, 40);
   const chosen = ladder[size.position] ?? null;
   const label = (value: string, fill = 'var(--ink)') => ({
     value,
@@ -38,7 +41,7 @@ export function EaseProfile({ result, ladder, context }: EaseProfileProps) {
     fill,
   });
   return (
-    <ResponsiveContainer width="100%" height={300}>
+    <ResponsiveContainer width="100%" height={HEIGHT}>
       <ComposedChart
         data={data}
         margin={{ top: 22, right: 12, bottom: 4, left: 0 }}
@@ -58,7 +61,9 @@ export function EaseProfile({ result, ladder, context }: EaseProfileProps) {
           tick={TICK}
           tickLine={false}
           axisLine={false}
-          tickFormatter={(mm: number) => printLength(mm, context.unit, { signed: true }).replace(/\.0$/, '')}
+          domain={[domain.low, domain.high]}
+          ticks={ticks.map((tick) => tick.mm)}
+          tickFormatter={(mm: number) => ticks.find((tick) => tick.mm === mm)?.label ?? ''}
         />
         <Area
           dataKey="room"

@@ -30,6 +30,8 @@ export function FitView({ ground, plan, held, onHeld, headingLevel, isPage = fal
   const answer = sayPlan(plan, context);
   const Heading = headingLevel === 1 ? 'h1' : 'h2';
   const isHeld = Object.keys(held).length > 0;
+  // With one size there is nothing to choose among.
+  const hold = context.sizes.length > 1 ? onHeld : undefined;
   return (
     <>
       {isPage && <title>{`${answer.replace(/[.]$/, '')} · Leeway`}</title>}
@@ -43,8 +45,12 @@ export function FitView({ ground, plan, held, onHeld, headingLevel, isPage = fal
         </Heading>
         <Watch plan={plan} context={context} saysHeld={!onHeld} />
       </Steady>
-      {onHeld && plan.zones.length > 0 && <HoldLine ground={ground} held={held} onBack={() => onHeld({})} />}
-      {actions}
+      <div className="mt-3 mb-2 flex flex-wrap items-start justify-between gap-x-10 gap-y-2">
+        {onHeld && plan.zones.length > 0 && (
+          <HoldLine ground={ground} held={held} onBack={() => onHeld({})} />
+        )}
+        {actions}
+      </div>
       {plan.zones.length > 0 && (
         <>
           <section aria-label="The instrument" className="mt-1">
@@ -52,14 +58,14 @@ export function FitView({ ground, plan, held, onHeld, headingLevel, isPage = fal
               ground={ground}
               plan={plan}
               held={held}
-              {...(onHeld && {
-                onHold: (zone, position) => onHeld({ ...held, [zone]: position }),
+              {...(hold && {
+                onHold: (zone, position) => hold({ ...held, [zone]: position }),
                 onRelease: (zone) =>
-                  onHeld(Object.fromEntries(Object.entries(held).filter(([each]) => each !== zone))),
+                  hold(Object.fromEntries(Object.entries(held).filter(([each]) => each !== zone))),
               })}
             />
           </section>
-          <Legend canChange={onHeld !== undefined} />
+          <Legend canChange={hold !== undefined} />
           <details className="mt-4 print:hidden">
             <summary className="inline-flex min-h-11 list-none items-center font-semibold text-woad [&::-webkit-details-marker]:hidden">
               <span className="changeable leading-tight">The same as a table</span>
@@ -72,7 +78,7 @@ export function FitView({ ground, plan, held, onHeld, headingLevel, isPage = fal
               options={ground.plan.options}
               plan={plan}
               context={context}
-              {...(onHeld && { onTake: onHeld })}
+              {...(hold && { onTake: hold })}
             />
             <BeforeCutting plan={plan} context={context} />
           </div>
@@ -89,7 +95,7 @@ function HoldLine({ ground: { context }, held, onBack }: { ground: Ground; held:
       `${sayZone(zone as keyof Held, context.chestWord)} at ${context.sizes[position] ?? ''}`,
   );
   return (
-    <p className="mt-3 flex min-h-11 flex-wrap items-center gap-x-5 print:hidden">
+    <p className="flex min-h-11 flex-wrap items-center gap-x-5 print:hidden">
       {words.length === 0 ? (
         <span className="text-ink-2">Another size here or there? Drag it along the path below.</span>
       ) : (

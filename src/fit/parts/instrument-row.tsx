@@ -123,7 +123,7 @@ function NarrowCells(props: CellProps) {
             </span>
           )}
         </p>
-        {result && <BarCell {...props} height={48} />}
+        {result && <BarCell {...props} height={result.easeMm === null ? 72 : 48} />}
         {result && <NarrowFigures result={result} context={context} />}
         <p
           className={`truncate text-small ${
@@ -150,8 +150,8 @@ function HeldTag(props: RowProps) {
   const left = Math.max(0, Math.min(layout.path.width - 2 * half, x - half));
   return (
     <div
-      className="absolute flex w-12 justify-center text-center text-small [&_button]:flex-col [&_button]:gap-0 [&_button]:bg-paper [&_button]:px-1"
-      style={{ left, top: place.height / 2 + 17 }}
+      className="absolute flex w-12 justify-center text-center text-small [&_button]:flex-col [&_button]:my-0 [&_button]:gap-0 [&_button]:bg-paper"
+      style={{ left, top: place.height / 2 + 18 }}
     >
       <HeldWord {...props} />
     </div>
@@ -212,7 +212,7 @@ function sayFollows({ follows }: FitRow, { chestWord }: SayContext): string {
 /** Where only the chart is known, what can still be said: how far this body is from the one the size is drafted for. */
 function sayDeviation({ deviationMm, size }: PointResult, { unit }: SayContext): string {
   if (deviationMm === null) return '';
-  if (Math.abs(deviationMm) < 0.5) return `; the body ${size.label} is drafted for`;
+  if (Math.abs(deviationMm) < 0.5) return `; exactly the body ${size.label} is drafted for`;
   const more = deviationMm > 0 ? 'more' : 'less';
   return `; ${printLengthWithUnit(Math.abs(deviationMm), unit)} ${more} than ${size.label} is drafted for`;
 }
@@ -237,7 +237,7 @@ function Figures({ result, context }: { result: PointResult; context: SayContext
 
 function NarrowFigures({ result, context }: { result: PointResult; context: SayContext }) {
   const isShort = result.verdict === 'belowFloor';
-  if (result.easeMm === null) return <p className="h-6" />;
+  if (result.easeMm === null) return null;
   return (
     <p className={`h-6 truncate text-note leading-6 ${isShort ? 'text-madder' : ''}`}>
       <b className="font-semibold">

@@ -1,5 +1,5 @@
 import { lazy, Suspense, useEffect, useRef, useState } from 'react';
-import type { FitPlan } from '../../../shared/fit/fit.schema.ts';
+import type { FitPlan, PointResult } from '../../../shared/fit/fit.schema.ts';
 import { sayProfile } from '../../../shared/fit/say-profile.ts';
 import { sayPoint } from '../../../shared/fit/say-words.ts';
 import { SentenceSelect } from '../../ui/sentence-select.tsx';
@@ -7,6 +7,8 @@ import type { Ground } from './fitting.ts';
 import { rowsInOrder } from './row-order.ts';
 
 const EaseProfile = lazy(async () => ({ default: (await import('./ease-profile.tsx')).EaseProfile }));
+
+const UNIT_WORDS = { cm: 'centimetres', mm: 'millimetres', in: 'inches' } as const;
 
 /** One point's ease over all sizes. The chart library is fetched only when somebody comes near it. */
 export function ProfileSection({ ground, plan }: { ground: Ground; plan: FitPlan }) {
@@ -16,7 +18,7 @@ export function ProfileSection({ ground, plan }: { ground: Ground; plan: FitPlan
   const results = rowsInOrder(plan).flatMap(({ result }) =>
     result?.easeMm === null || result === null ? [] : [result],
   );
-  const result = results.find(({ point }) => point === asked) ?? results[0];
+  const result = results.find(({ point }) => point === asked) ?? nearestToFloor(results);
   if (!result || ground.context.sizes.length < 2) return null;
   const ladder = ground.ladders.get(result.point) ?? [];
   const { context } = ground;
@@ -33,7 +35,8 @@ export function ProfileSection({ ground, plan }: { ground: Ground; plan: FitPlan
       </h2>
       <figure className="mt-2 max-w-[56rem]">
         <figcaption className="text-note text-ink-2">
-          {sayProfile(result.point, ladder, result.floorMm, context)} In {context.unit}, from the body.
+          {sayProfile(result.point, ladder, result.floorMm, context)} Drawn from the body, in{' '}
+          {UNIT_WORDS[context.unit]}.
         </figcaption>
         <div aria-hidden="true" className="mt-4 h-75">
           {isNear && (
@@ -45,6 +48,11 @@ export function ProfileSection({ ground, plan }: { ground: Ground; plan: FitPlan
       </figure>
     </section>
   );
+}
+
+/** Where there is least leeway one looks first. */
+function nearestToFloor(results: readonly PointResult[]): PointResult | undefined {
+  return [...results].sort((a, b) => (a.leewayMm ?? Infinity) - (b.leewayMm ?? Infinity))[0];
 }
 
 function useIsNear(element: React.RefObject<HTMLElement | null>): boolean {

@@ -8,6 +8,13 @@ export function Setting({ children }: { children: ReactNode }) {
   return <p className="max-w-[60em] text-lead text-ink-2">{children}</p>;
 }
 
+/** A word and the comma after it, which never begins a line. */
+export function WithComma({ children }: { children: ReactNode }) {
+  return (
+    <span className="whitespace-nowrap *:max-w-[calc(100%-0.6ch)] *:whitespace-normal">{children},</span>
+  );
+}
+
 /** A word of the setting that stands fast. */
 export function Fast({ children }: { children: ReactNode }) {
   return <span className="font-semibold text-ink">{children}</span>;

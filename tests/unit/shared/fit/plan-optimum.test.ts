@@ -14,7 +14,7 @@ function randomInput(random: () => number): FitInput {
   const body: Partial<Record<PointId, number>> = {};
   const preferenceMm: Partial<Record<PointId, number>> = {};
   for (const point of PLAIN_POINTS) {
-    const isLarge = !['neck', 'upperArm'].includes(point);
+    const isLarge = !['neck', 'backWidth', 'upperArm'].includes(point);
     const first = isLarge ? between(700, 1000) : between(250, 400);
     const grade = isLarge ? between(0, 60) : between(0, 20);
     const ease = between(-30, 160);
@@ -34,10 +34,10 @@ function randomInput(random: () => number): FitInput {
 }
 
 describe('planFit', () => {
-  it('finds the plan of least cost: equal to trying every plan with the formulas written down apart, 2,000 times', () => {
+  it('finds the plan of least cost: equal to trying every plan with the formulas written down apart, 1,000 times', () => {
     const random = seededRandom(8559);
     let planned = 0;
-    for (let draw = 0; draw < 2000; draw++) {
+    for (let draw = 0; draw < 1000; draw++) {
       const input = deepFreeze(randomInput(random));
       const least = plainLeastCost(input);
       const plan = planFit(input);
@@ -47,6 +47,6 @@ describe('planFit', () => {
         expect(plan.options[0]?.cost, `draw ${draw}`).toBeCloseTo(least, 7);
       }
     }
-    expect(planned).toBeGreaterThan(1900);
+    expect(planned).toBeGreaterThan(950);
   }, 60_000);
 });

@@ -102,6 +102,16 @@ describe('cautions and reasons', () => {
     expect(words('in')).toBe('The upper arm has 7/16 in less than wearing ease.');
   });
 
+  it('say the ends of the sizes, and of one size only what it is drafted for', () => {
+    const cautions: Caution[] = [{ code: 'beyondLargest', point: 'hip', amountMm: 60 }];
+    expect(sayCautions(cautions, context)[0]?.words).toBe(
+      'This pattern’s sizes end at 20: the hip is 6.0 cm beyond it.',
+    );
+    expect(sayCautions(cautions, { ...context, sizes: ['my coat'] })[0]?.words).toBe(
+      'The hip is 6.0 cm more than my coat is drafted for.',
+    );
+  });
+
   it('say it once for several points', () => {
     const cautions: Caution[] = [
       { code: 'belowFloor', point: 'waist', amountMm: 29 },
@@ -140,6 +150,13 @@ describe('sayWatch', () => {
     expect(words).toBe('Measure the hip again first: 0.9 cm of leeway is no more than a tape can be out.');
     expect(sayBorderline([point({ point: 'hip', borderline: true, leewayMm: -2 })], context)?.words).toBe(
       'Measure the hip again first: 0.2 cm is no more than a tape can be out.',
+    );
+    const two = [
+      point({ point: 'hip', borderline: true, leewayMm: 9 }),
+      point({ point: 'waist', borderline: true, leewayMm: 4 }),
+    ];
+    expect(sayBorderline(two, context)?.words).toBe(
+      'Measure the waist and hip again first: they lie so near wearing ease that the tape alone could decide.',
     );
     expect(sayBorderline([point({ point: 'hip' })], context)).toBeNull();
   });
@@ -232,7 +249,7 @@ describe('sayBeforeCutting', () => {
 describe('sayProfile', () => {
   it('says the range and the first size with wearing ease', () => {
     expect(sayProfile('hip', [-20, 20, 60, 100], 25, context)).toBe(
-      'At the hip, ease runs from −2.0 cm in 14 to 10.0 cm in 20. 18 is the first size with wearing ease (2.5 cm).',
+      'At the hip, ease runs from −2.0 cm at size 14 to 10.0 cm at size 20. 18 is the first size with wearing ease (2.5 cm).',
     );
   });
 

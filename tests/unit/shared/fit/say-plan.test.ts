@@ -51,7 +51,10 @@ describe('sayPlan', () => {
 
   it('joins steps in the same direction', () => {
     expect(sayPlan(plan({ shoulder: '12', bust: '12', waist: '14', hip: '16', hem: '16' }), context)).toBe(
-      'Cut 12 to the bust, then run out to 14 at the waist and to 16 from the hip down.',
+      'Cut 12 to the bust, then run out to 14 at the waist and 16 from the hip down.',
+    );
+    expect(sayPlan(plan({ shoulder: '10', bust: '12', waist: '14', hip: '16' }), context)).toBe(
+      'Cut 10 at the shoulder, then run out to 12 at the bust, 14 at the waist and 16 from the hip down.',
     );
   });
 

@@ -14,6 +14,7 @@ function problem(parents: number[], rows: number[][], more: Partial<TreeProblem>
     costs: rows.flat(),
     limits: parents.map(() => states),
     joinCosts: Array.from({ length: states }, (_, apart) => (apart === 0 ? 0 : 0.6 + 0.2 * apart * apart)),
+    joinWeights: parents.map(() => 1),
     overLimit: Infinity,
     tie: TIE,
     ...more,
@@ -28,7 +29,7 @@ function costOf(of: TreeProblem, states: readonly number[]): number {
     const apart = Math.abs(state - (states[of.parents[node] ?? 0] ?? NaN));
     const over = apart - (of.limits[node] ?? 0);
     const beyond = over > 0 ? of.overLimit * over : 0;
-    return sum + own + (of.joinCosts[apart] ?? NaN) + beyond;
+    return sum + own + (of.joinWeights[node] ?? NaN) * (of.joinCosts[apart] ?? NaN) + beyond;
   }, 0);
 }
 
@@ -59,6 +60,7 @@ function randomProblem(random: () => number): TreeProblem {
   const rows = parents.map(() => Array.from({ length: states }, cost));
   return problem(parents, rows, {
     limits: parents.map(() => Math.floor(random() * (states + 1))),
+    joinWeights: parents.map(() => (random() < 0.7 ? 1 : random())),
     overLimit: random() < 0.5 ? Infinity : 1000,
   });
 }
@@ -121,6 +123,15 @@ describe('treeMinimum', () => {
       const star = treeMinimum(problem([-1, 0, 0, 0], rows, { limits }));
       const { states = [] } = star.varied ?? {};
       expect(Math.abs((states[limited] ?? 0) - (states[0] ?? 0))).toBe(1);
+    }
+  });
+
+  it('lets a join that weighs less give way, at the first, a middle and the last node', () => {
+    for (const light of [1, 2, 3]) {
+      const joinWeights = [1, 1, 1, 1].map((weight, node) => (node === light ? 0.1 : weight));
+      const rows = [0, 1, 2, 3].map((node) => (node === 0 ? [0, 9] : [0.5, 0]));
+      const { states = [] } = treeMinimum(problem([-1, 0, 0, 0], rows, { joinWeights })).varied ?? {};
+      expect(states).toEqual([0, 1, 2, 3].map((node) => (node === light ? 1 : 0)));
     }
   });
 

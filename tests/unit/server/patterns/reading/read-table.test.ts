@@ -105,6 +105,12 @@ describe('the unit', () => {
     expect(places(read('Size,Bust (cm),Hip (cm)\n1,36,96\n2,38,100\n'))).toEqual(['unitDoubtful 1:2']);
   });
 
+  it('a cape’s finished hip of 2.3 m is no reason to doubt its inches', () => {
+    expect(places(read('Size,Hip (in)\nS,90\nM,94\n', 'finished'))).toEqual([]);
+    const open = read('Size,Hip\nS,90\nM,94\n', 'finished');
+    expect(open.issues.map((issue) => issue.code)).toEqual(['unitOpen']);
+  });
+
   it('a cell with its own unit is honoured and pointed out', () => {
     const table = read('Size,Bust (cm)\n1,92\n2,38 in\n');
     expect(table.rows[1]?.cells[1]?.mm).toBe(965.2);
