@@ -1,5 +1,5 @@
 // `npm start` and `npm run dev`: from a bare checkout to an address that answers. Needs no node_modules at first.
-import { mkdirSync } from 'node:fs';
+import { existsSync, mkdirSync } from 'node:fs';
 import { createServer } from 'node:net';
 import { dirname, join, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
@@ -47,10 +47,14 @@ async function start() {
   await checkPort(Number(process.env.PORT || 3000), process.env.HOST || '127.0.0.1');
   await whileLocked(root, 'packages', () => installPackages(root));
   if (!isDevelopment) await buildIfChanged(root);
-  // A configuration that cannot be used is told before anything is started.
+  // While the server's code is read, the database starts; the first time, though, it is first asked whether the
+  // configuration can be used.
+  const early =
+    isOwnDatabase && existsSync(join(dataFolder, 'database')) ? startOwnDatabase(dataFolder) : null;
+  early?.catch(() => undefined);
   const { readConfig, serve } = await loadServer();
-  readConfig(process.env, 'mysql://to-be-started/leeway');
-  const database = isOwnDatabase ? await startOwnDatabase(dataFolder) : null;
+  readConfig(process.env, 'mysql://not-yet-started/leeway');
+  const database = isOwnDatabase ? await (early ?? startOwnDatabase(dataFolder)) : null;
   const config = readConfig(process.env, database?.url);
   const served = await step('Preparing the tables', () => serve(config, { root, isDevelopment }));
   standing.push(served.stop);

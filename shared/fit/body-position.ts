@@ -4,7 +4,7 @@ import type { PointId } from '../points/point-ids.ts';
 import { checkInput } from './check-input.ts';
 import { refusals } from './cautions.ts';
 import type { FitInput } from './fit.schema.ts';
-import { reckon } from './reckoning.ts';
+import { reckon } from './reckon.ts';
 import type { ReckonedPoint, Reckoning } from './reckoning.ts';
 
 /**

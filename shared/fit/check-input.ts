@@ -73,9 +73,11 @@ function checkSizes(sizes: FitInput['sizes']): void {
 }
 
 function checkLengths(field: string, lengths: Figures): void {
-  for (const [point, value] of Object.entries(lengths)) {
-    if (value !== undefined && !isLength(value))
+  for (const point in lengths) {
+    const value = lengths[point];
+    if (value !== undefined && !isLength(value)) {
       throw new RangeError(`${field}.${point}: ${value} is not a length`);
+    }
   }
 }
 

@@ -42,11 +42,12 @@ export function pointCost(reckoning: Reckoning, point: ReckonedPoint, position: 
 /** The cheapest size of a zone taken by itself, the larger where equal; `except` is passed over where there is another. */
 export function bestSize(reckoning: Reckoning, costs: readonly number[], zone: number, except = -1): number {
   const { sizes } = reckoning;
+  const from = zone * sizes;
   let best = sizes === 1 ? 0 : -1;
   let least = Infinity;
   for (let s = 0; s < sizes; s++) {
-    const cost = costs[zone * sizes + s] ?? 0;
-    if (s === except || cost > least + TIE) continue;
+    const cost = costs[from + s] as number;
+    if (cost > least + TIE || s === except) continue;
     best = s;
     if (cost < least) least = cost;
   }

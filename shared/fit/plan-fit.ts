@@ -14,7 +14,7 @@ import type { ZoneId } from './fit-words.ts';
 import { governors, idOf, pointCost } from './governors.ts';
 import { pointResults, sizeChoice } from './point-results.ts';
 import { reasonsFor } from './reasons.ts';
-import { reckon } from './reckoning.ts';
+import { reckon } from './reckon.ts';
 import type { ReckonedPoint, Reckoning } from './reckoning.ts';
 import { chooseZones } from './zone-choice.ts';
 import type { ZoneChoice } from './zone-choice.ts';

@@ -93,8 +93,11 @@ function sayGroup(
   return `${listWords(named)} ${verdict}`;
 }
 
-/** What to do before cutting good cloth (common practice), with what this plan asks for first. */
-export function sayBeforeCutting(plan: FitPlan, context: SayContext): string[] {
+/**
+ * What to do before cutting good cloth (common practice), with what this plan asks for first. `cloth` is what the
+ * pattern says it is meant for; empty where it says nothing.
+ */
+export function sayBeforeCutting(plan: FitPlan, context: SayContext, cloth = ''): string[] {
   const tight = plan.points.filter((result) => result.verdict === 'belowFloor');
   const first = tight.map((result) => {
     const wanted =
@@ -106,6 +109,7 @@ export function sayBeforeCutting(plan: FitPlan, context: SayContext): string[] {
   return [
     ...first,
     ...(tight.length > 0 ? [] : ['Sew a toile first where the cloth is dear or the pattern is new to you.']),
+    ...(cloth.trim() === '' ? [] : [`The pattern is meant for ${cloth.trim().replace(/[.]$/, '')}.`]),
     'Fit in the cloth itself, or one that hangs like it: cloth of another weight sits differently.',
     'Measure the printed test square before you cut out the paper.',
   ];

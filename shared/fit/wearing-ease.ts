@@ -33,6 +33,7 @@ type Eases = Partial<Record<PointId, WearingEase>>;
 // Where two sources name the same garment the range spans both, and each says which end is its own.
 const UPPER_ARM = inches(2, null, THREADS);
 const HIP_ALL = inches(2, 2.75, ROBINSON);
+const HIGH_HIP = inches(0.5, 1, KREIFELS);
 const BUST_GENERAL = inches(2, 4, PRACTICE, 'commonPractice');
 const WAIST_GENERAL = inches(0.5, 2, PRACTICE, 'commonPractice');
 const BUST_BODICE = inches(1.5, 4, `${ROBINSON} (bodice, from 1.5); ${MCCUNN} (sleeved bodice, 4)`);
@@ -65,7 +66,7 @@ const TROUSERS: Eases = {
   ...LEG,
   waist: inches(0, 1, `${C209} (up to 1); ${KREIFELS} (0.5 to 1)`),
   abdomen: inches(0, 2, C209),
-  highHip: inches(0.5, 1, KREIFELS),
+  highHip: HIGH_HIP,
   hip: inches(1, 4, `${KREIFELS} (from 1); ${C209} (2 to 4)`),
 };
 
@@ -94,7 +95,7 @@ const EASES: Record<GarmentKind, Eases> = {
   cape: HUNG,
   wrap: HUNG,
   jumpsuit: { ...BODICE, ...LEG },
-  dungarees: { ...LEG, waist: WAIST_GENERAL, highHip: TROUSERS.highHip ?? HIP_ALL, hip: HIP_ALL },
+  dungarees: { ...LEG, waist: WAIST_GENERAL, highHip: HIGH_HIP, hip: HIP_ALL },
   robe: OUTER,
   nightwear: OUTER,
   swimwear: {},

@@ -8,6 +8,9 @@ import type { ZoneCosts } from './zone-costs.ts';
 import { groupZones } from './zone-groups.ts';
 import type { ZoneGroups } from './zone-groups.ts';
 
+/** For patterns of any usual length, worked out once. */
+const JOIN_COSTS = joinCosts(200);
+
 /** A size for every zone, by the garment's zone order, and what it costs with the pull of loose points. */
 export interface ZoneChoice {
   positions: number[];
@@ -43,6 +46,10 @@ function spread(choice: TreeChoice | null, groups: ZoneGroups): ZoneChoice | nul
   return { positions: groups.of.map((group) => choice.states[group] ?? 0), cost: choice.cost };
 }
 
+function joinCosts(sizes: number): number[] {
+  return Array.from({ length: sizes }, (_, apart) => joinCost(apart));
+}
+
 function makeProblem(
   reckoning: Reckoning,
   costs: readonly number[],
@@ -65,7 +72,7 @@ function makeProblem(
     states: sizes,
     costs: grouped,
     limits: groups.limits,
-    joinCosts: Array.from({ length: sizes }, (_, apart) => joinCost(apart)),
+    joinCosts: sizes <= JOIN_COSTS.length ? JOIN_COSTS : joinCosts(sizes),
     joinWeights: groups.weights,
     overLimit: Infinity,
     tie: TIE,

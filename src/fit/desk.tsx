@@ -59,7 +59,7 @@ export function Desk({ setId, revisionId, silhouette, hold }: DeskProps) {
             onChange={(next) => change({ silhouette: next === pattern.silhouette ? null : next })}
           />
         </WithComma>{' '}
-        of <Fast>woven cloth</Fast>
+        of <Fast>{pattern.structure === 'knit' ? 'a knit' : 'woven cloth'}</Fast>
       </Setting>
       {revision.id !== pattern.latestRevisionId && (
         <p className="mt-2 text-note text-ink-2">
@@ -73,11 +73,12 @@ export function Desk({ setId, revisionId, silhouette, hold }: DeskProps) {
           speech={{ unit: person.unit, chestWord: person.chestWord }}
           hold={hold}
           name={`${person.name}, ${pattern.title}`}
+          cloth={pattern.cloth}
         />
       ) : (
         <Unanswered error={fit.error} onRetry={() => void fit.refetch()} />
       )}
-      {fit.data?.plan.status === 'notEnough' && (
+      {fit.data?.plan.status === 'notEnough' && pattern.structure === 'woven' && (
         <p className="mt-6">
           <ButtonLink kind="primary" to={paths.measure(person.id)}>
             Measure {person.name}
@@ -113,9 +114,11 @@ interface ReckonedProps {
   speech: Parameters<typeof groundOf>[1];
   hold: readonly string[];
   name: string;
+  /** What the pattern says it is meant for. */
+  cloth: string;
 }
 
-function Reckoned({ answer, request, speech, hold, name }: ReckonedProps) {
+function Reckoned({ answer, request, speech, hold, name, cloth }: ReckonedProps) {
   const { unit, chestWord } = speech;
   const ground = useMemo(() => groundOf(answer.input, { unit, chestWord }), [answer.input, unit, chestWord]);
   const zones = ground.plan.zones.map(({ zone }) => zone);
@@ -139,6 +142,7 @@ function Reckoned({ answer, request, speech, hold, name }: ReckonedProps) {
         onHeld={setHeld}
         headingLevel={1}
         isPage
+        cloth={cloth}
         actions={
           plan.zones.length > 0 && (
             <div className="flex flex-wrap items-start gap-x-6 gap-y-2 print:hidden">

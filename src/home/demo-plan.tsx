@@ -71,7 +71,14 @@ export function DemoPlan() {
         </WithComma>{' '}
         of <Fast>woven cloth</Fast>
       </Setting>
-      <FitView ground={ground} plan={plan} held={held} onHeld={setHeld} headingLevel={2} />
+      <FitView
+        ground={ground}
+        plan={plan}
+        held={held}
+        onHeld={setHeld}
+        headingLevel={2}
+        cloth={chosen.pattern.cloth}
+      />
     </>
   );
 }

@@ -113,14 +113,22 @@ export const draftDetails = (kept: KeptDetails) =>
 /** For a resolver: the words of what a schema refuses. */
 export const detailsErrors = { error: sayIssue };
 
-/** What of a form's values can be kept now: everything but the fields that are not right yet. */
-export function savableDetails(typed: DetailsValues, kept: KeptDetails): DraftDetails {
+/**
+ * What of a form's values can be kept now: everything but the fields that are not right yet. Those are absent, so that
+ * what was kept of them before stands; `isAll` is false where there are any.
+ */
+export function savableDetails(
+  typed: DetailsValues,
+  kept: KeptDetails,
+): { details: DraftDetails; isAll: boolean } {
   const candidate = toCandidate(typed, kept);
   const result = draftDetailsSchema.safeParse(candidate);
-  if (result.success) return result.data;
+  if (result.success) return { details: result.data, isAll: true };
   const wrong = new Set(result.error.issues.map((issue) => String(issue.path[0])));
   const right = Object.entries(candidate).filter(([name]) => !wrong.has(name));
-  return draftDetailsSchema.parse(Object.fromEntries(right));
+  const parsed = Object.entries(draftDetailsSchema.parse(Object.fromEntries(right)));
+  // A schema's default would fill in what was left out.
+  return { details: Object.fromEntries(parsed.filter(([name]) => !wrong.has(name))), isAll: false };
 }
 
 /** What is still missing or not right before a pattern can be kept, by field. */

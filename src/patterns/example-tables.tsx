@@ -27,16 +27,16 @@ export function ExampleTable({ role }: { role: TableRole }) {
   const { name, headings, rows } = EXAMPLES[role];
   return (
     <table className="border-collapse text-note">
-      <caption className="pb-1 text-left text-small text-ink-2">{name}, for example</caption>
+      <caption className="pb-1 text-left text-small whitespace-nowrap text-ink-2">
+        {name}, for example
+      </caption>
       <thead>
-        <tr>
+        <tr className={`border-b-2 ${role === 'chart' ? 'border-ink' : 'border-dashed border-woad'}`}>
           {headings.map((heading) => (
             <th
               key={heading}
               scope="col"
-              className={`border-b-2 py-1 pr-5 text-left font-medium whitespace-nowrap last:pr-0 ${
-                role === 'chart' ? 'border-ink' : 'border-dashed border-woad'
-              }`}
+              className="py-1 pr-5 text-left font-medium whitespace-nowrap last:pr-0"
             >
               {heading}
             </th>

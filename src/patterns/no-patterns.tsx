@@ -45,7 +45,7 @@ export function NoPatterns() {
           <p className="mt-1 mb-4 max-w-[42rem] text-ink-2">
             CSV is plain text: a line for each size, the cells set apart by commas, semicolons or tabs. Every
             spreadsheet saves it. Type the envelope’s table with the points along the top and a row for each
-            size; inches such as 37 3/8 are read as well.
+            size; inches such as 37 3/8 and decimal commas are read as well.
           </p>
           <ExampleCsv role="chart" />
         </section>

@@ -19,8 +19,8 @@ const POINTS: readonly [PointId, first: number, grade: number, ease: number][] =
   ['calf', 310, 12, 60],
 ];
 const SIZES = 20;
-const ROUNDS = 400;
-const BATCH = 50;
+const WARMING = 5000;
+const ROUNDS = 10_000;
 
 /** A pattern of 20 sizes and 12 points, and a body that needs a blend. */
 export function benchInput(shift = 0): FitInput {
@@ -71,20 +71,23 @@ export function run(): Promise<Figure[]> {
   ]);
 }
 
-/** The median time of one call of each, in µs; the calls take turns, so that all see the same machine. */
+/**
+ * The median time of one call of each, in µs. Each call is timed by itself and they take turns, so that what else the
+ * machine does falls on all of them and out of the median.
+ */
 function medians(calls: ((round: number) => unknown)[]): number[] {
   const times = calls.map<number[]>(() => []);
-  let sink = 0;
-  for (let round = 0; round < ROUNDS; round++) {
+  let empty = 0;
+  for (let round = 0; round < WARMING + ROUNDS; round++) {
     calls.forEach((call, index) => {
       const start = process.hrtime.bigint();
-      for (let i = 0; i < BATCH; i++) sink += call(round + i) === null ? 1 : 0;
-      const spent = Number(process.hrtime.bigint() - start) / 1000 / BATCH;
-      // The first half only warms the machine up.
-      if (round >= ROUNDS / 2) times[index]?.push(spent);
+      const answer = call(round);
+      const spent = Number(process.hrtime.bigint() - start) / 1000;
+      if (answer === null) empty++;
+      if (round >= WARMING) times[index]?.push(spent);
     });
   }
-  if (sink !== 0) throw new Error('a call gave nothing');
+  if (empty > 0) throw new Error('a call gave nothing');
   return times.map((all) => all.sort((a, b) => a - b)[Math.floor(all.length / 2)] ?? NaN);
 }
 

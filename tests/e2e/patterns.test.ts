@@ -64,10 +64,12 @@ describe('a pattern', () => {
     expect(await waist('room')).toEqual(['5.0', '5.0', '5.0']);
     await expectAccessible(page);
     await page.getByLabel('How lengths are shown').selectOption('typed');
-    await page.waitForURL(/shown=typed/);
+    await rows.getByText('body, cm').first().waitFor();
+    expect(page.url()).toMatch(/shown=typed/);
     expect(await waist('body')).toEqual(['64', '68', '72']);
     await page.getByLabel('How lengths are shown').selectOption('in');
-    await page.waitForURL(/shown=in/);
+    await rows.getByText('3 1/8').first().waitFor();
+    expect(page.url()).toMatch(/shown=in/);
     expect(await rows.locator('tbody', { hasText: 'Bust' }).getByRole('row').last().innerText()).toMatch(
       /3 1\/8/,
     );

@@ -27,7 +27,7 @@ export function Watch({ plan, context, saysHeld }: WatchProps) {
         ))}
       </ul>
       {rest.length > 0 && (
-        <details className="group mt-2">
+        <details className="group mt-2 print:[&::details-content]:[content-visibility:visible]">
           <summary className="inline-flex min-h-11 list-none items-center font-semibold text-woad print:hidden [&::-webkit-details-marker]:hidden">
             <span className="changeable leading-tight group-open:hidden">
               {rest.length === 1 ? 'One more note' : `${rest.length} more notes`}

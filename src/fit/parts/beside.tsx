@@ -32,12 +32,11 @@ export function Options({ options, plan, context, onTake }: OptionsProps) {
                 onTake && (
                   <button
                     type="button"
+                    aria-label={`Cut it this way: ${said.title}`}
                     className="inline-flex min-h-11 items-center font-semibold text-woad print:hidden"
                     onClick={() => onTake(sizesOf(option))}
                   >
-                    <span className="changeable leading-tight">
-                      Cut it this way<span className="sr-only">: {said.title}</span>
-                    </span>
+                    <span className="changeable leading-tight">Cut it this way</span>
                   </button>
                 )
               )}
@@ -83,12 +82,20 @@ export function Cutting({ plan, context }: { plan: FitPlan; context: SayContext 
 }
 
 /** What to do before the shears: common practice, with what this plan asks for first. */
-export function BeforeCutting({ plan, context }: { plan: FitPlan; context: SayContext }) {
+export function BeforeCutting({
+  plan,
+  context,
+  cloth,
+}: {
+  plan: FitPlan;
+  context: SayContext;
+  cloth: string;
+}) {
   return (
     <section>
       <SectionHeading>Before you cut</SectionHeading>
       <ol className="mt-3 list-decimal space-y-2 pl-5 text-note marker:text-ink-2">
-        {sayBeforeCutting(plan, context).map((words) => (
+        {sayBeforeCutting(plan, context, cloth).map((words) => (
           <li key={words}>{words}</li>
         ))}
       </ol>

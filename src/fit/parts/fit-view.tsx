@@ -18,6 +18,8 @@ interface FitViewProps {
   onHeld?: (held: Held) => void;
   /** The answer is the page's heading, or stands under one. */
   headingLevel: 1 | 2;
+  /** The cloth the pattern is meant for, in its maker's words, where they are known. */
+  cloth?: string;
   /** The answer names the document too. */
   isPage?: boolean;
   /** Between what is said and what is drawn: saving, for example. */
@@ -25,7 +27,16 @@ interface FitViewProps {
 }
 
 /** The whole answer: the sentence, what to watch, the instrument, and what to do at the table. */
-export function FitView({ ground, plan, held, onHeld, headingLevel, isPage = false, actions }: FitViewProps) {
+export function FitView({
+  ground,
+  plan,
+  held,
+  onHeld,
+  headingLevel,
+  isPage = false,
+  cloth = '',
+  actions,
+}: FitViewProps) {
   const { context } = ground;
   const answer = sayPlan(plan, context);
   const Heading = headingLevel === 1 ? 'h1' : 'h2';
@@ -80,7 +91,7 @@ export function FitView({ ground, plan, held, onHeld, headingLevel, isPage = fal
               context={context}
               {...(hold && { onTake: hold })}
             />
-            <BeforeCutting plan={plan} context={context} />
+            <BeforeCutting plan={plan} context={context} cloth={cloth} />
           </div>
         </>
       )}

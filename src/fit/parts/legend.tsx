@@ -12,8 +12,7 @@ export function Legend({ canChange }: { canChange: boolean }) {
   return (
     <div className="border-t border-rule pt-4 text-small text-ink-2">
       <Fills id={id} />
-      <h3 className="sr-only">What the marks mean</h3>
-      <ul className="flex flex-wrap gap-x-7 gap-y-2">
+      <ul aria-label="What the marks mean" className="flex flex-wrap gap-x-7 gap-y-2">
         <Item word="the body">
           <line x1="14" x2="14" y1="1" y2="21" stroke="var(--ink)" strokeWidth="3" />
         </Item>

@@ -23,7 +23,7 @@ export function ProfileSection({ ground, plan }: { ground: Ground; plan: FitPlan
   const ladder = ground.ladders.get(result.point) ?? [];
   const { context } = ground;
   return (
-    <section ref={box} className="mt-14 break-inside-avoid">
+    <section ref={box} className="mt-14 print:hidden">
       <h2 className="text-section font-semibold tracking-[-0.005em]">
         Ease in every size at the{' '}
         <SentenceSelect

@@ -69,7 +69,7 @@ function Mark({ isHandle, isHeld, sizeLabel }: SizeNodeProps) {
   const text = sizeLabel.length > 5 ? 'text-[0.6875rem]' : 'text-small';
   return (
     <span
-      className={`max-w-19 min-w-7.5 truncate rounded-full border-2 border-woad px-1.5 text-center leading-6 font-semibold group-focus-visible:outline-3 group-focus-visible:outline-offset-2 group-focus-visible:outline-woad ${text} ${
+      className={`max-w-19 min-w-7.5 truncate rounded-full border-2 border-woad px-1.5 text-center leading-6 font-semibold [print-color-adjust:exact] group-focus-visible:outline-3 group-focus-visible:outline-offset-2 group-focus-visible:outline-woad ${text} ${
         isHeld ? 'bg-woad text-paper' : 'bg-paper text-ink'
       }`}
     >

@@ -1,16 +1,11 @@
 import { useState } from 'react';
-import type {
-  ImportCorrections,
-  ImportDraft,
-  ImportTable,
-  TableRole,
-} from '../../../shared/patterns/imports.schema.ts';
+import type { ImportCorrections, ImportTable, TableRole } from '../../../shared/patterns/imports.schema.ts';
 import type { PointId } from '../../../shared/points/point-ids.ts';
 import type { LengthUnit } from '../../../shared/units.ts';
 import { useChangeImport } from '../queries.ts';
 
 /** What a person has chosen for a table so far, read off the table itself. */
-export function correctionsOf(table: ImportTable): ImportCorrections {
+function correctionsOf(table: ImportTable): ImportCorrections {
   const chosen = table.columns.filter((column) => column.sureness === 'chosen');
   return {
     unit: table.unitFrom === 'chosen' ? table.unit : null,
@@ -22,8 +17,8 @@ export function correctionsOf(table: ImportTable): ImportCorrections {
  * Choosing what a column is, or the unit. The choice shows at once; the server reads the table again and answers how
  * it then stands. Where that fails, the table is shown as the server still has it.
  */
-export function useCorrections(draft: ImportDraft, role: TableRole, table: ImportTable) {
-  const change = useChangeImport(draft.id);
+export function useCorrections(draftId: string, role: TableRole, table: ImportTable) {
+  const change = useChangeImport(draftId);
   const [asked, setAsked] = useState<ImportCorrections | null>(null);
   const corrections = asked ?? correctionsOf(table);
   const send = (next: ImportCorrections) => {

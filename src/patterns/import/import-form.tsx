@@ -58,13 +58,21 @@ export function ImportForm({ draft }: { draft: ImportDraft }) {
         </form>
       </Part>
       <Part id="chart" number={2} title="The size chart" line="chart">
-        <TablePart draft={draft} role="chart" name="Size chart" shownIn={shownIn} onShowIn={showIn} />
+        <TablePart
+          draftId={draft.id}
+          role="chart"
+          name="Size chart"
+          table={draft.chart}
+          shownIn={shownIn}
+          onShowIn={showIn}
+        />
       </Part>
       <Part id="finished" number={3} title="The finished measurements" line="finished">
         <TablePart
-          draft={draft}
+          draftId={draft.id}
           role="finished"
           name="Finished measurements"
+          table={draft.finished}
           shownIn={shownIn}
           onShowIn={showIn}
         />

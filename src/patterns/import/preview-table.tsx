@@ -1,4 +1,4 @@
-import { memo } from 'react';
+import { memo, useMemo } from 'react';
 import type { ImportColumn, ImportTable, TableRole } from '../../../shared/patterns/imports.schema.ts';
 import type { LengthUnit } from '../../../shared/units.ts';
 import { STICKY_CORNER, STICKY_HEAD, STICKY_SIDE, WideTable } from '../../ui/wide-table.tsx';
@@ -21,7 +21,7 @@ interface PreviewTableProps {
 
 /** A table as it was understood, cell by cell: what was typed, and under it what it was taken for. */
 export function PreviewTable({ role, table, notes, shownIn, corrections }: PreviewTableProps) {
-  const marks = byTarget(notes);
+  const marks = useMemo(() => byTarget(notes), [notes]);
   const sizeColumn = table.columns.find((column) => column.role === 'size');
   const columns = table.columns.filter((column) => column !== sizeColumn);
   return (

@@ -11,7 +11,6 @@ export function SavingWord({ state, onRetry }: { state: SavingState; onRetry: ()
       <div role="alert">
         <Notice kind="error" word="Not saved">
           <p className="text-note">{state.words}</p>
-          <p className="text-note">What you typed stays in this page.</p>
           <Button kind="quiet" onClick={onRetry}>
             Save it now
           </Button>

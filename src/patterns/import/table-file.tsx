@@ -1,7 +1,6 @@
 import { useState } from 'react';
 import {
   IMPORT_BYTES_MAX,
-  type ImportDraft,
   type ImportTable,
   type TableRole,
 } from '../../../shared/patterns/imports.schema.ts';
@@ -22,16 +21,16 @@ const TOO_LARGE =
   'This file is larger than 5 MB. A table of 200 sizes is far smaller: bring the table alone.';
 
 interface TableFileProps {
-  draft: ImportDraft;
+  draftId: string;
   role: TableRole;
   name: string;
   table: ImportTable | null;
 }
 
 /** Where a table's file is brought in, replaced and taken out. What is refused says so here and changes nothing. */
-export function TableFile({ draft, role, name, table }: TableFileProps) {
-  const upload = useUploadTable(draft.id);
-  const remove = useRemoveTable(draft.id);
+export function TableFile({ draftId, role, name, table }: TableFileProps) {
+  const upload = useUploadTable(draftId);
+  const remove = useRemoveTable(draftId);
   const [tooLarge, setTooLarge] = useState(false);
   const take = (file: File) => {
     remove.reset();

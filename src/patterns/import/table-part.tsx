@@ -1,4 +1,5 @@
-import type { ImportDraft, ImportTable, TableRole } from '../../../shared/patterns/imports.schema.ts';
+import { memo, useMemo } from 'react';
+import type { ImportTable, TableRole } from '../../../shared/patterns/imports.schema.ts';
 import type { LengthUnit } from '../../../shared/units.ts';
 import { Notice } from '../../ui/notice.tsx';
 import { SentenceSelect } from '../../ui/sentence-select.tsx';
@@ -12,25 +13,29 @@ import { PreviewTable } from './preview-table.tsx';
 import { TableFile } from './table-file.tsx';
 
 interface TablePartProps {
-  draft: ImportDraft;
+  draftId: string;
   role: TableRole;
   name: string;
+  table: ImportTable | null;
   shownIn: LengthUnit;
   onShowIn: (unit: LengthUnit) => void;
 }
 
-/** One of the two tables: what it is, its file, and how it was understood. */
-export function TablePart({ draft, role, name, shownIn, onShowIn }: TablePartProps) {
-  const table = draft[role];
+/**
+ * One of the two tables: what it is, its file, and how it was understood. Drawn anew only when its table is read anew:
+ * it may have twelve thousand cells, and the details are typed above it.
+ */
+export const TablePart = memo(function TablePart(props: TablePartProps) {
+  const { draftId, role, name, table, shownIn, onShowIn } = props;
   return (
     <>
       <p className="mb-5 max-w-[40rem] text-ink-2">{TABLE_MEANINGS[role]}</p>
-      <TableFile draft={draft} role={role} name={name} table={table} />
+      <TableFile draftId={draftId} role={role} name={name} table={table} />
       {/* A new file is read anew: what was chosen for the one before is not taken over by the page. */}
       {table && (
         <Understood
           key={table.file.id}
-          draft={draft}
+          draftId={draftId}
           role={role}
           table={table}
           shownIn={shownIn}
@@ -39,7 +44,7 @@ export function TablePart({ draft, role, name, shownIn, onShowIn }: TablePartPro
       )}
     </>
   );
-}
+});
 
 const UNIT_FROM_WORDS: Record<ImportTable['unitFrom'], string> = {
   chosen: 'as you chose',
@@ -49,11 +54,11 @@ const UNIT_FROM_WORDS: Record<ImportTable['unitFrom'], string> = {
 };
 const DELIMITER_WORDS: Record<string, string> = { ',': 'commas', ';': 'semicolons', '\t': 'tabs' };
 
-type UnderstoodProps = Omit<TablePartProps, 'name'> & { table: ImportTable };
+type UnderstoodProps = Omit<TablePartProps, 'name' | 'table'> & { table: ImportTable };
 
-function Understood({ draft, role, table, shownIn, onShowIn }: UnderstoodProps) {
-  const corrections = useCorrections(draft, role, table);
-  const notes = noteIssues(table, role);
+function Understood({ draftId, role, table, shownIn, onShowIn }: UnderstoodProps) {
+  const corrections = useCorrections(draftId, role, table);
+  const notes = useMemo(() => noteIssues(table, role), [table, role]);
   const hasTable = table.columns.length > 0;
   return (
     <div className="mt-7">

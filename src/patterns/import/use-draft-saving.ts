@@ -32,10 +32,11 @@ export function useDraftSaving(draft: ImportDraft, form: Form, kept: KeptDetails
     if (!current.isDirty) return current.running;
     current.isDirty = false;
     setState({ is: 'saving' });
-    current.running = mutateAsync({ details: savableDetails(form.getValues(), kept) }).then(
+    const { details, isAll } = savableDetails(form.getValues(), kept);
+    current.running = mutateAsync({ details }).then(
       () => {
         // A field that is not right yet is typed and not saved: it is still kept here.
-        if (!current.isDirty && Object.keys(form.formState.errors).length === 0) forgetTyping(draft.id);
+        if (!current.isDirty && isAll) forgetTyping(draft.id);
         setState({ is: current.isDirty ? 'waiting' : 'saved' });
         return true;
       },

@@ -243,6 +243,10 @@ describe('sayBeforeCutting', () => {
     expect(words[0]).toContain('upper arm');
     expect(words[0]).toContain('1.1 cm');
     expect(words.at(-1)).toContain('test square');
+    expect(words.join(' ')).not.toContain('meant for');
+    expect(sayBeforeCutting(plan(), context, 'washed linen.')).toContain(
+      'The pattern is meant for washed linen.',
+    );
   });
 });
 
