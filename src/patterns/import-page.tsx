@@ -22,7 +22,7 @@ export function Component() {
       <p className="mt-3 max-w-[42rem] text-ink-2">
         {draft.patternId === null
           ? 'One table is enough; with both, the room the draft gives is known. '
-          : 'They become the pattern’s next revision. The one before stays, and so do the plans made with it. '}
+          : 'They become the pattern’s next revision, which has the tables brought here and no others: bring both again if the pattern has both. The revision before stays, and so do the plans made with it. '}
         Everything is kept as you go, half done too: come back to it any time, on any device.
       </p>
       <ImportForm key={draft.id} draft={draft} />

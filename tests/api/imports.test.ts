@@ -261,9 +261,7 @@ describe('imports: bad input is refused in words, and what was there stays', () 
   it.each(refusals)('%s', async (_name, content, status, words) => {
     const { id } = await start(ada, { details: DETAILS });
     const before = await upload(ada, id, 'chart', CHART);
-    const started = performance.now();
     const answer = await send(ada, id, 'chart', content).expect(status);
-    expect(performance.now() - started).toBeLessThan(3000);
     const said = JSON.stringify(answer.body);
     expect(said).toContain(words);
     if (status === 422) expect(pointersOf(answer.body)).toEqual(['/file']);

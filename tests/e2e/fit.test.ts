@@ -6,10 +6,13 @@ import { expectAccessible } from '../support/accessible.ts';
 import { PHONE, visitor, type VisitOptions } from '../support/browser.ts';
 
 const visit = visitor();
-const peopleSchema = z.object({ items: z.array(z.object({ name: z.string(), latestSetId: z.string() })) });
+const peopleSchema = z.object({
+  items: z.array(z.object({ id: z.string(), name: z.string(), latestSetId: z.string() })),
+});
 const patternsSchema = z.object({
   items: z.array(z.object({ title: z.string(), latestRevisionId: z.string() })),
 });
+const setsSchema = z.object({ items: z.array(z.object({ id: z.string() })) });
 const idSchema = z.object({ id: z.string() });
 
 const answer = (page: Page) => page.getByRole('heading', { level: 1 });
@@ -138,6 +141,31 @@ describe('the fit view', () => {
     await page.getByRole('button', { name: 'Delete the plan' }).click();
     await page.waitForURL(`**${paths.plans}`);
     expect(await page.getByRole('link', { name: called }).count()).toBe(0);
+  });
+
+  it('says on a saved plan that somebody has been measured since, and offers to plan anew', async () => {
+    const page = await openDress();
+    const now = new URL(page.url()).searchParams;
+    const people = peopleSchema.parse(await (await page.request.get('/api/people')).json());
+    const tilde = people.items.find(({ name }) => name === 'Tilde')!;
+    const sets = setsSchema.parse(
+      await (await page.request.get(`/api/people/${tilde.id}/measurement-sets`)).json(),
+    );
+    const earlier = sets.items.find(({ id }) => id !== tilde.latestSetId)!;
+    const saved = await page.request.post('/api/plans', {
+      headers: { origin: visit.baseURL },
+      data: {
+        name: 'As in April',
+        measurementSetId: earlier.id,
+        revisionId: now.get('revision'),
+        options: {},
+      },
+    });
+    await page.goto(paths.plan(idSchema.parse(await saved.json()).id));
+    await page.getByText(/^Tilde has been measured since, on 7 November 2026\./).waitFor();
+    await page.getByRole('link', { name: 'Plan it anew' }).click();
+    await slider(page, 'hip').waitFor();
+    expect(new URL(page.url()).searchParams.get('set')).toBe(tilde.latestSetId);
   });
 });
 

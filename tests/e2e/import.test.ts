@@ -227,6 +227,7 @@ describe('an import', () => {
     await page.getByRole('link', { name: 'Bring in new tables' }).click();
     await page.getByRole('heading', { level: 1, name: 'New tables for Ferry dress' }).waitFor();
     await finishedField(page).setInputFiles(csvFile('roomier.csv', FINISHED.replace('100;77', '101;78')));
+    await page.getByText(/^Ready: 3 sizes, 10 to 14, with the finished measurements/).waitFor();
     await page.getByRole('button', { name: 'Keep these tables' }).click();
     await page.getByText('Revision 2, shown here').waitFor();
     await page.getByRole('link', { name: 'Revision 1' }).click();

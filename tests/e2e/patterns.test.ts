@@ -22,6 +22,7 @@ describe('the list of patterns', () => {
     await importPattern(page, visit.baseURL, { title: 'Mooring skirt', kind: 'skirt' });
     await page.goto('/patterns');
     const list = page.getByRole('list', { name: 'Patterns' });
+    await list.waitFor();
     expect(await list.getByRole('listitem').count()).toBe(2);
     await expectAccessible(page);
     await page.getByLabel('Kind of garment').selectOption('skirt');
