@@ -16,6 +16,8 @@ export default defineConfig({
     reportCompressedSize: false,
   },
   test: {
+    // Of two cores it would use one; the tests often wait for a database or a browser.
+    maxWorkers: 2,
     projects: [
       { extends: true, test: { name: 'unit', include: ['tests/unit/**/*.test.{ts,tsx}'], setupFiles } },
       {

@@ -32,7 +32,11 @@ const absentWhenEmpty = (value: unknown) => (value === '' ? undefined : value);
 const setting = <T extends z.ZodType>(schema: T) => z.preprocess(absentWhenEmpty, schema);
 
 const url = (protocols: RegExp, message: string) =>
-  z.string().refine((text) => URL.canParse(text) && protocols.test(new URL(text).protocol), message);
+  // Aborts: what follows may take it for an address.
+  z.string().refine((text) => URL.canParse(text) && protocols.test(new URL(text).protocol), {
+    abort: true,
+    error: message,
+  });
 
 const environmentSchema = z.object({
   PORT: setting(z.string().default('3000')).pipe(

@@ -112,7 +112,6 @@ export const alterationSchema = z.object({
   edges: z.number().int().nullable(),
   perEdgeMm: z.number().nullable(),
 });
-export type Alteration = z.infer<typeof alterationSchema>;
 
 /** One crossing from a size line to another, as it is cut. `overMm` is measured down the garment. */
 export const blendSchema = z.object({

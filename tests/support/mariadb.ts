@@ -1,4 +1,4 @@
-import { mkdirSync, mkdtempSync, readdirSync, rmSync } from 'node:fs';
+import { mkdirSync, mkdtempSync, readdirSync, rmSync, statSync } from 'node:fs';
 import { join } from 'node:path';
 import type { TestProject } from 'vitest/node';
 import { startDatabase } from '../../server/bin/database.mjs';
@@ -12,24 +12,22 @@ declare module 'vitest' {
 }
 
 const HOME = join(import.meta.dirname, '../../.test');
+const MINUTE_MS = 60_000;
 
-/** One private MariaDB for the whole run, or the one that `npm test` has started for all its steps. */
+/** One private MariaDB for the whole run. */
 export default async function setup(project: TestProject): Promise<() => Promise<void>> {
-  const given = process.env['LEEWAY_TEST_SERVER'];
-  if (given !== undefined) {
-    project.provide('mariaDbUrl', given);
-    return () => Promise.resolve();
-  }
   const server = await startThrowawayServer();
   project.provide('mariaDbUrl', server.url);
   return server.stop;
 }
 
 /** A server whose data are removed when it stops; what a killed run left behind is removed first. */
-export async function startThrowawayServer(): Promise<{ url: string; stop: () => Promise<void> }> {
+async function startThrowawayServer(): Promise<{ url: string; stop: () => Promise<void> }> {
   mkdirSync(HOME, { recursive: true });
   for (const name of readdirSync(HOME).filter((entry) => entry.startsWith('mariadb-'))) {
-    const lock = await lockFolder(join(HOME, name), 'test');
+    // One made a moment ago may belong to a run that is about to lock it.
+    const isNew = Date.now() - statSync(join(HOME, name)).mtimeMs < MINUTE_MS;
+    const lock = isNew ? null : await lockFolder(join(HOME, name), 'test');
     if (lock === null) continue;
     rmSync(join(HOME, name), { recursive: true, force: true });
     await lock.release();
