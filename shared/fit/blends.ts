@@ -1,6 +1,6 @@
 import type { PointId } from '../points/point-ids.ts';
 import type { FitPoint } from './fit-garment.ts';
-import type { Blend, FitInput } from './fit.schema.ts';
+import type { Blend, FitInput, SizeRow } from './fit.schema.ts';
 import { levelDistance } from './levels.ts';
 import { sizeChoice } from './point-results.ts';
 import type { ReckonedPoint, Reckoning } from './reckoning.ts';
@@ -13,15 +13,15 @@ import type { ReckonedPoint, Reckoning } from './reckoning.ts';
 export function blendsOf(
   input: FitInput,
   reckoning: Reckoning,
-  positions: readonly number[],
+  places: readonly number[],
   governing: readonly (ReckonedPoint | null)[],
 ): Blend[] {
   const { parents } = reckoning.garment;
   const blends: Blend[] = [];
-  for (let zone = 1; zone < positions.length; zone++) {
+  for (let zone = 1; zone < places.length; zone++) {
     const parent = parents[zone] ?? 0;
-    if (positions[zone] === positions[parent]) continue;
-    const blend = blendAt(input, reckoning, positions, governing, parent, zone);
+    if (places[zone] === places[parent]) continue;
+    const blend = blendAt(input, reckoning, places, governing, parent, zone);
     if (blend) blends.push(blend);
   }
   return blends;
@@ -30,16 +30,17 @@ export function blendsOf(
 function blendAt(
   input: FitInput,
   reckoning: Reckoning,
-  positions: readonly number[],
+  places: readonly number[],
   governing: readonly (ReckonedPoint | null)[],
   parent: number,
   zone: number,
 ): Blend | null {
+  const { rows } = reckoning;
   const { zones, points } = reckoning.garment;
   const fromZone = zones[parent];
   const toZone = zones[zone];
-  const from = positions[parent] ?? 0;
-  const to = positions[zone] ?? 0;
+  const from = places[parent] ?? 0;
+  const to = places[zone] ?? 0;
   // Told at the level that is reached; where nothing is known there, by the grade of the level that is left.
   const candidates: (FitPoint | undefined)[] = [
     governing[zone]?.spec,
@@ -49,16 +50,16 @@ function blendAt(
   ];
   for (const spec of candidates) {
     if (!spec || !fromZone || !toZone) continue;
-    const changeMm = changeBetween(input, spec.point, from, to);
+    const changeMm = changeBetween(input, spec.point, rows[from], rows[to]);
     if (changeMm === null) continue;
     const edges = input.garment.seamEdges?.[spec.point] ?? spec.edges;
     const perEdgeMm = changeMm / edges;
-    const over = levelDistance(input, input.sizes[from], fromZone, toZone);
+    const over = levelDistance(input, rows[from], fromZone, toZone);
     return {
       fromZone,
       toZone,
-      from: sizeChoice(input, from),
-      to: sizeChoice(input, to),
+      from: sizeChoice(reckoning, from),
+      to: sizeChoice(reckoning, to),
       point: spec.point,
       changeMm,
       edges,
@@ -72,9 +73,12 @@ function blendAt(
 }
 
 /** By how much the garment changes at a point between two sizes, in mm: as sewn, else as charted; null where unknown. */
-function changeBetween(input: FitInput, point: PointId, from: number, to: number): number | null {
-  const before = input.sizes[from];
-  const after = input.sizes[to];
+function changeBetween(
+  input: FitInput,
+  point: PointId,
+  before: SizeRow | undefined,
+  after: SizeRow | undefined,
+): number | null {
   const sewnBefore = before?.finished[point];
   const sewnAfter = after?.finished[point];
   if (sewnBefore !== undefined && sewnAfter !== undefined) return sewnAfter - sewnBefore;

@@ -21,7 +21,7 @@ export function bodyPosition(input: FitInput, point: PointId): number | null {
 export function bodyPositions(input: FitInput): Partial<Record<PointId, number>> {
   checkInput(input);
   if (refusals(input).length > 0) return {};
-  const reckoning = reckon(input);
+  const reckoning = reckon(input, 1);
   const positions: Partial<Record<PointId, number>> = {};
   for (const point of reckoning.points) {
     if (!point.chooses) continue;
@@ -33,7 +33,7 @@ export function bodyPositions(input: FitInput): Partial<Record<PointId, number>>
 }
 
 function positionOf(reckoning: Reckoning, point: ReckonedPoint, wanted: number): number | null {
-  if (reckoning.sizes === 1) {
+  if (reckoning.places === 1) {
     return (reckoning.deviation[point.at] ?? 0) / (reckoning.step[point.at] ?? 1);
   }
   if (point.case === 'finished') {
@@ -52,7 +52,7 @@ function knots(
   by: 'finished' | 'ranges' | 'middles',
 ): ScaleKnot[] {
   const found: ScaleKnot[] = [];
-  for (let s = 0; s < reckoning.sizes; s++) {
+  for (let s = 0; s < reckoning.places; s++) {
     const low = reckoning.chartLow[point.at + s] ?? NaN;
     const high = reckoning.chartHigh[point.at + s] ?? NaN;
     if (by === 'finished') found.push({ value: reckoning.finished[point.at + s] ?? NaN, position: s });

@@ -13,15 +13,8 @@ export function refusals(input: FitInput): Caution[] {
     refused.push({ code: 'shrinkageNotReckoned' });
   }
   if (layers !== undefined && layers.length > 0) refused.push({ code: 'layersNotReckoned' });
-  if (input.cutBetweenLines === true || holdsBetweenLines(input))
-    refused.push({ code: 'halfSizesNotReckoned' });
   if (input.lean !== undefined) refused.push({ code: 'leanNotReckoned' });
   return refused;
-}
-
-function holdsBetweenLines(input: FitInput): boolean {
-  const held: Partial<Record<string, number>> = input.held ?? {};
-  return Object.values(held).some((position) => position !== undefined && !Number.isInteger(position));
 }
 
 /** What is missing, and which points abstain, whatever is planned. */
@@ -39,11 +32,11 @@ export function tableCautions(reckoning: Reckoning): Caution[] {
 }
 
 /** What to know of each point at the planned sizes: unknown ease, less than wearing ease. Amounts in mm. */
-export function pointCautions(reckoning: Reckoning, positions: readonly number[]): Caution[] {
+export function pointCautions(reckoning: Reckoning, places: readonly number[]): Caution[] {
   const cautions: Caution[] = [];
   for (const { spec, at, bodyMm, case: found } of reckoning.points) {
     const { point, zone } = spec;
-    const i = at + (positions[spec.zoneAt] ?? 0);
+    const i = at + (places[spec.zoneAt] ?? 0);
     const ease = (reckoning.finished[i] ?? NaN) - bodyMm;
     const floor = reckoning.floor[i] ?? NaN;
     if (found === 'chart' && Number.isNaN(ease)) cautions.push({ code: 'easeUnknown', point, zone });
@@ -68,11 +61,11 @@ export function endCautions(
     const { spec } = point;
     const farMm = BEYOND_PER_EDGE_MM * (input.garment.seamEdges?.[spec.point] ?? spec.edges);
     const isJudged = spec.role !== 'loose' || isAllLoose;
-    for (const [code, position, sign] of [
+    for (const [code, place, sign] of [
       ['beyondSmallest', 0, -1],
-      ['beyondLargest', reckoning.sizes - 1, 1],
+      ['beyondLargest', reckoning.places - 1, 1],
     ] as const) {
-      const i = point.at + position;
+      const i = point.at + place;
       const beyond = sign * (reckoning.deviation[i] ?? 0);
       const isBeyond = isJudged && beyond > (reckoning.half[i] ?? 0) + TIE;
       const isShort = sign > 0 && missingAt(reckoning, point, i) > farMm;
@@ -110,11 +103,11 @@ const PASSES: readonly [opening: PointId, body: PointId, zone: ZoneId][] = [
 ];
 
 /** Where nothing opens (`pullOn`): each opening that is smaller than what must pass through it, and by how much in mm. */
-export function passCautions(input: FitInput, reckoning: Reckoning, positions: readonly number[]): Caution[] {
+export function passCautions(input: FitInput, reckoning: Reckoning, places: readonly number[]): Caution[] {
   if (input.garment.pullOn !== true) return [];
   return PASSES.flatMap(([opening, body, zone]) => {
-    const position = positions[reckoning.garment.zones.indexOf(zone)];
-    const openingMm = position === undefined ? undefined : input.sizes[position]?.finished[opening];
+    const place = places[reckoning.garment.zones.indexOf(zone)];
+    const openingMm = place === undefined ? undefined : reckoning.rows[place]?.finished[opening];
     const amountMm = (input.body[body] ?? NaN) - (openingMm ?? NaN);
     return amountMm > 0 ? [{ code: 'doesNotPass' as const, point: opening, zone, amountMm }] : [];
   });

@@ -1,4 +1,5 @@
 import type { FitInput, Measured } from './fit.schema.ts';
+import { placesPerSize } from './between-lines.ts';
 import { isGarmentKind } from './garments.ts';
 
 /** Figures by point or zone; a key may be there without a value. */
@@ -6,7 +7,7 @@ type Figures = Readonly<Partial<Record<string, number>>>;
 
 /**
  * Throws a RangeError that names the field where the input cannot be meant: a length that is not a positive number, no
- * size, a label used twice, a size held beyond the pattern's, a share or thickness below zero.
+ * size, a label used twice, a size held beyond the pattern's or between its lines where it is cut along them, a share or thickness below zero.
  */
 export function checkInput(input: FitInput): void {
   const { garment, fabric, sizes } = input;
@@ -27,24 +28,20 @@ export function checkInput(input: FitInput): void {
     checkShare(`layers[${index}].thicknessMm`, layer.thicknessMm);
     if (layer.finishedMm) checkLengths(`layers[${index}].finishedMm`, layer.finishedMm);
   });
-  checkPositions('held', input.held, sizes.length, false);
+  checkPositions('held', input.held, input);
 }
 
-/** Throws a RangeError naming the zone where a position is not one of so many sizes; whole sizes only, if asked. */
-export function checkPositions(
-  field: string,
-  positions: Figures | undefined,
-  sizes: number,
-  isWhole: boolean,
-): void {
+/** Throws a RangeError naming the zone where a position is none of the sizes, nor half-way where halves are planned. */
+export function checkPositions(field: string, positions: Figures | undefined, input: FitInput): void {
   if (!positions) return;
+  const sizes = input.sizes.length;
   for (const [zone, position] of Object.entries(positions)) {
     if (position === undefined) continue;
     if (!(position >= 0 && position <= sizes - 1)) {
       throw new RangeError(`${field}.${zone}: ${position} is not a position among ${sizes} sizes`);
     }
-    if (isWhole && !Number.isInteger(position)) {
-      throw new RangeError(`${field}.${zone}: ${position} lies between two sizes`);
+    if (!Number.isInteger(position * placesPerSize(input))) {
+      throw new RangeError(`${field}.${zone}: ${position} lies between the lines that are planned by`);
     }
   }
 }

@@ -47,6 +47,12 @@ export const SHARE_OF_HANGING = 1e-3;
  * made for it, and left out of every cost that is told.
  */
 export const NEARNESS = 1e-3;
+/**
+ * Where a size's own line and one between the lines would be as good, the size's is wanted: it is printed on the tissue,
+ * and the other has to be drawn. Like nearness it tips a tie only, is weighed a hundredth of it, and is left out of
+ * every cost that is told. A hanging zone's must still be more than a tie.
+ */
+export const BETWEEN_LINES = 1e-5;
 /** Costs closer than this are equal: the larger size is then taken, as is usual in a woven (common practice). */
 export const TIE = 1e-9;
 

@@ -97,11 +97,10 @@ export const CAUTION_CODES = [
   'slight',
   /** A blend between hip and thigh: keep the whole crotch curve in one size. */
   'crotchCurve',
-  /** Not reckoned yet: knit or stretch cloth, shrinkage, layers, half sizes. */
+  /** Not reckoned yet: knit or stretch cloth, shrinkage, layers. */
   'knitNotReckoned',
   'shrinkageNotReckoned',
   'layersNotReckoned',
-  'halfSizesNotReckoned',
   'leanNotReckoned',
 ] as const;
 export type CautionCode = (typeof CAUTION_CODES)[number];

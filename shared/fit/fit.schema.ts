@@ -77,8 +77,15 @@ export const fitInputSchema = z.object({
 });
 export type FitInput = z.infer<typeof fitInputSchema>;
 
-/** A size by its label and its position in the grade (0 is the first). */
-export const sizeChoiceSchema = z.object({ label: z.string(), position: z.number() });
+/**
+ * A size by its label and its position in the grade (0 is the first). Half-way between two sizes (3.5, `16–18`)
+ * `between` has the labels of both.
+ */
+export const sizeChoiceSchema = z.object({
+  label: z.string(),
+  position: z.number(),
+  between: z.object({ smaller: z.string(), larger: z.string() }).optional(),
+});
 export type SizeChoice = z.infer<typeof sizeChoiceSchema>;
 
 /** One point at one size: every length in mm, null where it cannot be said. */

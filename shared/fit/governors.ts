@@ -10,15 +10,15 @@ import type { ZoneCosts } from './zone-costs.ts';
 export function governors(
   reckoning: Reckoning,
   zones: ZoneCosts,
-  positions: readonly number[],
+  places: readonly number[],
 ): (ReckonedPoint | null)[] {
   const found = reckoning.garment.zones.map<ReckonedPoint | null>(() => null);
   const losses = found.map(() => -Infinity);
-  const others = positions.map((position, zone) => bestSize(reckoning, zones.costs, zone, position));
+  const others = places.map((place, zone) => bestPlace(reckoning, zones.costs, zone, place));
   for (const point of reckoning.points) {
     const { zoneAt } = point.spec;
     const other = others[zoneAt] ?? 0;
-    const here = positions[zoneAt] ?? 0;
+    const here = places[zoneAt] ?? 0;
     if (!point.chooses && pointCost(reckoning, point, other) <= pointCost(reckoning, point, here)) continue;
     if (point.case === 'falls' || point.case === 'someSizes') continue;
     // With one size nothing is lost: then the weightiest point stands for the zone.
@@ -33,19 +33,19 @@ export function governors(
   return found;
 }
 
-/** What a point costs at a size. */
-export function pointCost(reckoning: Reckoning, point: ReckonedPoint, position: number): number {
-  const i = point.at + position;
+/** What a point costs at a place. */
+export function pointCost(reckoning: Reckoning, point: ReckonedPoint, place: number): number {
+  const i = point.at + place;
   return (reckoning.deviationCost[i] ?? 0) + (reckoning.floorCost[i] ?? 0);
 }
 
-/** The cheapest size of a zone taken by itself, the larger where equal; `except` is passed over where there is another. */
-export function bestSize(reckoning: Reckoning, costs: readonly number[], zone: number, except = -1): number {
-  const { sizes } = reckoning;
-  const from = zone * sizes;
-  let best = sizes === 1 ? 0 : -1;
+/** The cheapest place of a zone taken by itself, the larger where equal; `except` is passed over where there is another. */
+export function bestPlace(reckoning: Reckoning, costs: readonly number[], zone: number, except = -1): number {
+  const { places } = reckoning;
+  const from = zone * places;
+  let best = places === 1 ? 0 : -1;
   let least = Infinity;
-  for (let s = 0; s < sizes; s++) {
+  for (let s = 0; s < places; s++) {
     const cost = costs[from + s] as number;
     if (cost > least + TIE || s === except) continue;
     best = s;

@@ -22,12 +22,13 @@ import { joinCost, zoneCosts } from './zone-costs.ts';
 import type { ZoneCosts } from './zone-costs.ts';
 
 /** The version of the engine, kept beside every answer. */
-export const ENGINE_VERSION = '1.0.0';
+export const ENGINE_VERSION = '1.1.0';
 
 /**
  * Plans which size to cut where: the best single size and the best blend, cheapest first, and the plan is the cheapest.
  * All lengths in mm. Misuse (no size, a negative length, a size held beyond the pattern's) throws a RangeError that
- * names the field; what is missing or not reckoned yet is answered as `notEnough` with its cautions.
+ * names the field; what is missing or not reckoned yet is answered as `notEnough` with its cautions. Cut between the
+ * lines too, sizes are planned by halves: position 3.5 lies half-way between the fourth size and the fifth.
  */
 export function planFit(input: FitInput): FitPlan {
   checkInput(input);
@@ -43,7 +44,7 @@ export function planFit(input: FitInput): FitPlan {
   const options = drafts.map((draft) => tellOption(input, reckoning, draft));
   const { zones: planned = [], points = [], blends = [] } = options[0] ?? {};
   const ends = endCautions(input, reckoning);
-  const { positions, governing } = best;
+  const { places, governing } = best;
   return {
     status: ends.isOutOfRange ? 'outOfRange' : 'planned',
     zones: planned,
@@ -52,43 +53,46 @@ export function planFit(input: FitInput): FitPlan {
     blends,
     alterations: [],
     certainty: null,
-    reasons: reasonsFor(input, reckoning, zones, positions, governing),
+    reasons: reasonsFor(input, reckoning, zones, places, governing),
     cautions: [
       ...cautions,
       ...ends.cautions,
-      ...pointCautions(reckoning, positions),
-      ...passCautions(input, reckoning, positions),
+      ...pointCautions(reckoning, places),
+      ...passCautions(input, reckoning, places),
       ...blendCautions(blends),
     ],
   };
 }
 
 /**
- * Every point at the sizes held by hand, from neck to hem: a whole position (0 is the first size) for each zone; a zone
- * without one is left out. Positions beyond the sizes throw a RangeError; what `planFit` refuses gives no points.
+ * Every point at the sizes held by hand, from neck to hem: a position for each zone (0 is the first size, 0.5 half-way
+ * to the second where it is cut between the lines too); a zone without one is left out. Others throw a RangeError; what `planFit` refuses gives no points.
  */
 export function evaluateAt(input: FitInput, positions: Partial<Record<ZoneId, number>>): PointResult[] {
   checkInput(input);
-  checkPositions('positions', positions, input.sizes.length, true);
+  checkPositions('positions', positions, input);
   if (refusals(input).length > 0) return [];
   const reckoning = reckon(input);
   return pointResults(
     input,
     reckoning,
-    reckoning.garment.zones.map((zone) => positions[zone]),
+    reckoning.garment.zones.map((zone) => {
+      const position = positions[zone];
+      return position === undefined ? undefined : position * reckoning.perSize;
+    }),
   );
 }
 
-/** Every point at every size, in grade order: one table a size. Bad input throws as in `planFit`; what it refuses is empty. */
+/** Every point at every whole size, in grade order: one table a size. Bad input throws as in `planFit`; what it refuses is empty. */
 export function easeProfile(input: FitInput): PointResult[][] {
   checkInput(input);
   if (refusals(input).length > 0) return input.sizes.map(() => []);
-  const reckoning = reckon(input);
-  return input.sizes.map((_, position) =>
+  const reckoning = reckon(input, 1);
+  return input.sizes.map((_, place) =>
     pointResults(
       input,
       reckoning,
-      reckoning.garment.zones.map(() => position),
+      reckoning.garment.zones.map(() => place),
     ),
   );
 }
@@ -107,64 +111,63 @@ function notEnough(cautions: Caution[]): FitPlan {
   };
 }
 
-/** An option before it is told: sizes by the garment's zone order. */
+/** An option before it is told: places by the garment's zone order. */
 interface Draft {
   kind: 'oneSize' | 'blend';
-  positions: number[];
+  places: number[];
   governing: (ReckonedPoint | null)[];
   cost: number;
 }
 
 function draftOptions(reckoning: Reckoning, zones: ZoneCosts, held: FitInput['held']): Draft[] {
   const { oneSize, blend } = chooseZones(reckoning, zones, held);
-  const draft = (kind: Draft['kind'], { positions }: ZoneChoice): Draft => ({
+  const draft = (kind: Draft['kind'], { places }: ZoneChoice): Draft => ({
     kind,
-    positions,
-    governing: governors(reckoning, zones, positions),
-    cost: costOf(reckoning, positions),
+    places,
+    governing: governors(reckoning, zones, places),
+    cost: costOf(reckoning, places),
   });
   if (!oneSize) return blend ? [draft('blend', blend)] : [];
   const single = draft('oneSize', oneSize);
   // A blend that brings no point nearer is no advice.
-  if (!blend || pointsCost(reckoning, blend.positions) >= single.cost - TIE) return [single];
+  if (!blend || pointsCost(reckoning, blend.places) >= single.cost - TIE) return [single];
   const blended = draft('blend', blend);
   return blend.cost < oneSize.cost - TIE ? [blended, single] : [single, blended];
 }
 
 function tellOption(input: FitInput, reckoning: Reckoning, draft: Draft): FitOption {
-  const { kind, positions, governing, cost } = draft;
+  const { kind, places, governing, cost } = draft;
   const zones: ZonePlan[] = [];
   for (const zoneAt of reckoning.garment.shown) {
     const zone = reckoning.garment.zones[zoneAt];
     if (zone === undefined) continue;
     zones.push({
       zone,
-      size: sizeChoice(input, positions[zoneAt] ?? 0),
+      size: sizeChoice(reckoning, places[zoneAt] ?? 0),
       governedBy: idOf(governing[zoneAt]),
     });
   }
   return {
     kind,
     zones,
-    points: pointResults(input, reckoning, positions),
+    points: pointResults(input, reckoning, places),
     alterations: [],
-    blends: blendsOf(input, reckoning, positions, governing),
+    blends: blendsOf(input, reckoning, places, governing),
     cost,
   };
 }
 
-function pointsCost(reckoning: Reckoning, positions: readonly number[]): number {
+function pointsCost(reckoning: Reckoning, places: readonly number[]): number {
   let cost = 0;
-  for (const point of reckoning.points)
-    cost += pointCost(reckoning, point, positions[point.spec.zoneAt] ?? 0);
+  for (const point of reckoning.points) cost += pointCost(reckoning, point, places[point.spec.zoneAt] ?? 0);
   return cost;
 }
 
-function costOf(reckoning: Reckoning, positions: readonly number[]): number {
+function costOf(reckoning: Reckoning, places: readonly number[]): number {
   const { parents, weights } = reckoning.garment;
-  let cost = pointsCost(reckoning, positions);
-  for (let zone = 1; zone < positions.length; zone++) {
-    const apart = Math.abs((positions[zone] ?? 0) - (positions[parents[zone] ?? 0] ?? 0));
+  let cost = pointsCost(reckoning, places);
+  for (let zone = 1; zone < places.length; zone++) {
+    const apart = Math.abs((places[zone] ?? 0) - (places[parents[zone] ?? 0] ?? 0)) / reckoning.perSize;
     cost += (weights[zone] ?? 1) * joinCost(apart);
   }
   return cost;

@@ -5,24 +5,27 @@ import type { FitInput, Measured, PointResult, SizeChoice } from './fit.schema.t
 import type { Verdict } from './fit-words.ts';
 import type { ReckonedPoint, Reckoning } from './reckoning.ts';
 
-/** The size at a position of the grade (0 is the first), with its label. */
-export function sizeChoice(input: FitInput, position: number): SizeChoice {
-  return { label: input.sizes[position]?.label ?? '', position };
+/** What stands at a place, with its label and its position in the grade (0 is the first size). */
+export function sizeChoice({ rows, perSize }: Reckoning, place: number): SizeChoice {
+  const label = rows[place]?.label ?? '';
+  if (place % perSize === 0) return { label, position: place / perSize };
+  const between = { smaller: rows[place - 1]?.label ?? '', larger: rows[place + 1]?.label ?? '' };
+  return { label, position: place / perSize, between };
 }
 
 /**
- * Every reckoned point at the sizes of its zone, from neck to hem; `positions` by the garment's zone order, and a zone
- * without a position is left out.
+ * Every reckoned point at the places of its zone, from neck to hem; `places` by the garment's zone order, and a zone
+ * without one is left out.
  */
 export function pointResults(
   input: FitInput,
   reckoning: Reckoning,
-  positions: readonly (number | undefined)[],
+  places: readonly (number | undefined)[],
 ): PointResult[] {
   const results: PointResult[] = [];
   for (const point of reckoning.points) {
-    const position = positions[point.spec.zoneAt];
-    if (position !== undefined) results.push(pointResult(input, reckoning, point, position));
+    const place = places[point.spec.zoneAt];
+    if (place !== undefined) results.push(pointResult(input, reckoning, point, place));
   }
   return results;
 }
@@ -31,10 +34,10 @@ function pointResult(
   input: FitInput,
   reckoning: Reckoning,
   point: ReckonedPoint,
-  position: number,
+  place: number,
 ): PointResult {
   const { spec, bodyMm } = point;
-  const i = point.at + position;
+  const i = point.at + place;
   const finishedMm = known(reckoning.finished[i]);
   const easeMm = finishedMm === null ? null : finishedMm - bodyMm;
   const floorMm = known(reckoning.floor[i]);
@@ -43,7 +46,7 @@ function pointResult(
   return {
     point: spec.point,
     zone: spec.zone,
-    size: sizeChoice(input, position),
+    size: sizeChoice(reckoning, place),
     bodyMm,
     chartMm: chartAt(reckoning, i),
     finishedMm,

@@ -1,6 +1,6 @@
 import { TIE } from './constants.ts';
 import type { FitInput, Reason } from './fit.schema.ts';
-import { bestSize, pointCost } from './governors.ts';
+import { bestPlace, pointCost } from './governors.ts';
 import type { ReckonedPoint, Reckoning } from './reckoning.ts';
 import type { ZoneCosts } from './zone-costs.ts';
 
@@ -12,15 +12,15 @@ export function reasonsFor(
   input: FitInput,
   reckoning: Reckoning,
   zones: ZoneCosts,
-  positions: readonly number[],
+  places: readonly number[],
   governing: readonly (ReckonedPoint | null)[],
 ): Reason[] {
   const reasons: Reason[] = [];
-  const isOneSize = positions.every((position) => position === positions[0]);
+  const isOneSize = places.every((place) => place === places[0]);
   for (const zoneAt of reckoning.garment.shown) {
     const zone = reckoning.garment.zones[zoneAt];
     if (zone === undefined) continue;
-    const position = positions[zoneAt] ?? 0;
+    const place = places[zoneAt] ?? 0;
     if (input.held?.[zone] !== undefined) {
       reasons.push({ code: 'held', zone });
       continue;
@@ -30,17 +30,17 @@ export function reasonsFor(
       reasons.push({ code: 'followsNeighbour', zone });
       continue;
     }
-    const deviation = deviationAt(reckoning, governor, position);
+    const deviation = deviationAt(reckoning, governor, place);
     reasons.push({ code: 'governs', zone, point: governor.spec.point, ...amount(deviation) });
-    const wanted = bestSize(reckoning, zones.costs, zoneAt);
-    const floor = floorReason(reckoning, zones, zoneAt, wanted, position);
+    const wanted = bestPlace(reckoning, zones.costs, zoneAt);
+    const floor = floorReason(reckoning, zones, zoneAt, wanted, place);
     if (floor) reasons.push(floor);
-    if (wanted !== position && !isTied(reckoning, zones, zoneAt, wanted, position)) {
-      const given = givenUp(reckoning, zoneAt, wanted, position) ?? governor;
+    if (wanted !== place && !isTied(reckoning, zones, zoneAt, wanted, place)) {
+      const given = givenUp(reckoning, zoneAt, wanted, place) ?? governor;
       const code = isOneSize ? 'oneSizeIsEnough' : 'joinHolds';
-      const givenDeviation = deviationAt(reckoning, given, position);
+      const givenDeviation = deviationAt(reckoning, given, place);
       reasons.push({ code, zone, point: given.spec.point, ...amount(givenDeviation) });
-    } else if (governor.chooses && isTied(reckoning, zones, zoneAt, position - 1, position)) {
+    } else if (governor.chooses && isTied(reckoning, zones, zoneAt, place - reckoning.perSize, place)) {
       reasons.push({ code: 'tieToLarger', zone, point: governor.spec.point });
     }
   }
@@ -53,10 +53,10 @@ function floorReason(
   zones: ZoneCosts,
   zoneAt: number,
   wanted: number,
-  position: number,
+  place: number,
 ): Reason | null {
-  const byDeviation = bestSize(reckoning, zones.deviationCosts, zoneAt);
-  if (byDeviation >= wanted || byDeviation >= position) return null;
+  const byDeviation = bestPlace(reckoning, zones.deviationCosts, zoneAt);
+  if (byDeviation >= wanted || byDeviation >= place) return null;
   let deepest: Reason | null = null;
   for (const { spec, at, bodyMm } of reckoning.points) {
     if (spec.zoneAt !== zoneAt) continue;
@@ -69,17 +69,12 @@ function floorReason(
 }
 
 /** The point that gives up most by the zone's not having the size it would take by itself. */
-function givenUp(
-  reckoning: Reckoning,
-  zoneAt: number,
-  wanted: number,
-  position: number,
-): ReckonedPoint | null {
+function givenUp(reckoning: Reckoning, zoneAt: number, wanted: number, place: number): ReckonedPoint | null {
   let found: ReckonedPoint | null = null;
   let most = 0;
   for (const point of reckoning.points) {
     if (point.spec.zoneAt !== zoneAt) continue;
-    const loss = pointCost(reckoning, point, position) - pointCost(reckoning, point, wanted);
+    const loss = pointCost(reckoning, point, place) - pointCost(reckoning, point, wanted);
     if (loss <= most) continue;
     most = loss;
     found = point;
@@ -89,12 +84,12 @@ function givenUp(
 
 function isTied(reckoning: Reckoning, zones: ZoneCosts, zoneAt: number, a: number, b: number): boolean {
   if (a < 0) return false;
-  const from = zoneAt * reckoning.sizes;
+  const from = zoneAt * reckoning.places;
   return Math.abs((zones.costs[from + a] ?? 0) - (zones.costs[from + b] ?? 0)) <= TIE;
 }
 
-function deviationAt(reckoning: Reckoning, point: ReckonedPoint, position: number): number {
-  return reckoning.deviation[point.at + position] ?? NaN;
+function deviationAt(reckoning: Reckoning, point: ReckonedPoint, place: number): number {
+  return reckoning.deviation[point.at + place] ?? NaN;
 }
 
 function amount(mm: number): { amountMm?: number } {

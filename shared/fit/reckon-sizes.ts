@@ -10,9 +10,14 @@ import type { FitPoint } from './fit-garment.ts';
 import type { FitInput } from './fit.schema.ts';
 import type { ReckonedPoint, Reckoning } from './reckoning.ts';
 
-/** Fills in deviation, step, half-width, floor and costs of a point at every size; its columns must have been read. */
+/**
+ * Fills in deviation, step, half-width, floor and costs of a point at every place; its columns must have been read.
+ * The grade step goes from size to size: at a size to the neighbour on the side of the deviation, at an end to the one
+ * there is. Half-way between two sizes it is the distance between these two, whichever side the deviation is on: then
+ * a body between a size and the half beside it is measured by the same step from both, and the nearer wins.
+ */
 export function reckonSizes(input: FitInput, reckoning: Reckoning, point: ReckonedPoint): void {
-  const { chartLow, chartHigh, finished, sizes } = reckoning;
+  const { chartLow, chartHigh, finished, places, perSize } = reckoning;
   const { deviation: deviations, step: steps, half: halves, floor: floors } = reckoning;
   const { deviationCost: deviationCosts, floorCost: floorCosts } = reckoning;
   const { spec, at, bodyMm, chooses, case: found } = point;
@@ -26,23 +31,29 @@ export function reckonSizes(input: FitInput, reckoning: Reckoning, point: Reckon
   const carriesDraft =
     found !== 'falls' && (input.garment.draftedStretch ?? 0) <= (input.fabric.stretch ?? 0);
   const floorWeight = WEIGHT_FLOOR * spec.share;
-  const leastStep = leastStepMm(point, sizes);
+  const leastStep = leastStepMm(point, places);
   let before = NaN;
-  let here = sizeMm(reckoning, at, isSewn);
-  for (let s = 0; s < sizes; s++) {
+  let size = NaN;
+  let next = sizeMm(reckoning, at, isSewn);
+  for (let s = 0; s < places; s++) {
     const i = at + s;
+    const isSize = s % perSize === 0;
+    if (isSize) {
+      before = size;
+      size = next;
+      next = s + perSize < places ? sizeMm(reckoning, i + perSize, isSewn) : NaN;
+    }
     const low = chartLow[i] as number;
     const high = chartHigh[i] as number;
     const sewn = finished[i] as number;
-    const next = s + 1 < sizes ? sizeMm(reckoning, i + 1, isSewn) : NaN;
     const outside = wanted > high ? wanted - high : wanted < low ? wanted - low : 0;
     const deviation = !chooses ? NaN : isSewn ? wanted + targetMm - sewn : outside;
-    const isDown = s === sizes - 1 || (deviation < 0 && s > 0);
-    const gap = isDown ? here - before : next - here;
+    const isDown = isSize && (s === places - 1 || (deviation < 0 && s > 0));
+    const gap = isDown ? size - before : next - size;
     const step = gap > leastStep ? gap : leastStep;
     // Not below what the drafter meant for the largest body of the size.
     const floor = carriesDraft && sewn - high < wearingMm ? sewn - high : wearingMm;
-    const half = halfWidth(step, hasDraft ? sewn - here : isSewn ? targetMm : NaN, floor, bodyMm);
+    const half = halfWidth(step, hasDraft ? sewn - (low + high) / 2 : isSewn ? targetMm : NaN, floor, bodyMm);
     const share = deviation / half;
     const missing = (floor - sewn + bodyMm) / step;
     deviations[i] = deviation;
@@ -51,8 +62,6 @@ export function reckonSizes(input: FitInput, reckoning: Reckoning, point: Reckon
     floors[i] = spec.floorBinds ? floor : NaN;
     deviationCosts[i] = chooses ? deviationCost(spec, share) : 0;
     floorCosts[i] = floorActs && missing > 0 ? floorWeight * missing * missing : 0;
-    before = here;
-    here = next;
   }
 }
 
@@ -63,8 +72,8 @@ function sizeMm(reckoning: Reckoning, i: number, isSewn: boolean): number {
 }
 
 /** What tapes can tell apart; with one size, which has no neighbour, a usual grade. */
-function leastStepMm({ spec }: ReckonedPoint, sizes: number): number {
-  if (sizes > 1) return STEP_LEAST_TAPE_ERRORS * MEASURES[spec.point].tapeErrorMm;
+function leastStepMm({ spec }: ReckonedPoint, places: number): number {
+  if (places > 1) return STEP_LEAST_TAPE_ERRORS * MEASURES[spec.point].tapeErrorMm;
   return spec.measure === 'girth' ? STEP_ONE_SIZE_GIRTH_MM : STEP_ONE_SIZE_WIDTH_MM;
 }
 

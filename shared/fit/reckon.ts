@@ -1,13 +1,14 @@
 import { doubles } from '../numeric/doubles.ts';
 import type { PointId } from '../points/point-ids.ts';
+import { latticeRows, placesPerSize } from './between-lines.ts';
 import { fitGarment } from './fit-garment.ts';
 import type { FitGarment, FitPoint } from './fit-garment.ts';
 import type { FitInput, SizeRow } from './fit.schema.ts';
 import { reckonSizes } from './reckon-sizes.ts';
 import type { PointCase, ReckonedPoint, Reckoning } from './reckoning.ts';
 
-/** Reckons every shared point at every size; the input must have been checked. */
-export function reckon(input: FitInput): Reckoning {
+/** Reckons every shared point at every place, or at whole sizes only if asked; the input must have been checked. */
+export function reckon(input: FitInput, perSize: 1 | 2 = placesPerSize(input)): Reckoning {
   const { kind, silhouette, worn, compareAs } = input.garment;
   const garment = fitGarment(kind, silhouette, worn);
   const measured: [spec: FitPoint, bodyPoint: PointId, bodyMm: number][] = [];
@@ -18,10 +19,16 @@ export function reckon(input: FitInput): Reckoning {
     if (bodyMm !== undefined) measured.push([spec, bodyPoint, bodyMm]);
     else if (spec.role !== 'loose' && isGiven(input, spec.point, bodyPoint)) notMeasured.push(spec);
   }
-  const reckoning = emptyReckoning(garment, input.sizes.length, measured.length, notMeasured);
+  const reckoning = emptyReckoning(
+    garment,
+    latticeRows(input.sizes, perSize),
+    perSize,
+    measured.length,
+    notMeasured,
+  );
   for (const [spec, bodyPoint, bodyMm] of measured) {
-    const at = reckoning.points.length * reckoning.sizes;
-    const found = readColumns(input, reckoning, at, spec, bodyPoint);
+    const at = reckoning.points.length * reckoning.places;
+    const found = readColumns(reckoning, at, spec, bodyPoint);
     if (found === null) continue;
     const chooses = found === 'both' || found === 'chart' || found === 'finished';
     const point: ReckonedPoint = { spec, case: found, at, bodyMm, bodyPoint, chooses };
@@ -33,14 +40,17 @@ export function reckon(input: FitInput): Reckoning {
 
 function emptyReckoning(
   garment: FitGarment,
-  sizes: number,
+  rows: readonly SizeRow[],
+  perSize: 1 | 2,
   points: number,
   notMeasured: FitPoint[],
 ): Reckoning {
-  const cells = points * sizes;
+  const cells = points * rows.length;
   return {
     garment,
-    sizes,
+    places: rows.length,
+    perSize,
+    rows,
     points: [],
     notMeasured,
     chartLow: doubles(cells),
@@ -63,21 +73,14 @@ function isGiven(input: FitInput, point: PointId, bodyPoint: PointId): boolean {
 }
 
 /** Reads the two tables' columns and says which case the point is; null where the pattern does not give it. */
-function readColumns(
-  input: FitInput,
-  reckoning: Reckoning,
-  at: number,
-  spec: FitPoint,
-  bodyPoint: PointId,
-): PointCase | null {
-  const { chartLow, chartHigh, finished, sizes } = reckoning;
-  const { sizes: rows } = input;
+function readColumns(reckoning: Reckoning, at: number, spec: FitPoint, bodyPoint: PointId): PointCase | null {
+  const { chartLow, chartHigh, finished, places, perSize, rows } = reckoning;
   const { point } = spec;
   let charted = 0;
   let sewn = 0;
   let chartFalls = false;
   let sewnFalls = false;
-  for (let s = 0; s < sizes; s++) {
+  for (let s = 0; s < places; s++) {
     const row = rows[s] as SizeRow;
     const chart = row.body[bodyPoint];
     const low = chart === undefined ? NaN : typeof chart === 'number' ? chart : chart.low;
@@ -89,14 +92,15 @@ function readColumns(
     finished[i] = garment;
     if (low > 0) charted++;
     if (garment > 0) sewn++;
-    if (s === 0) continue;
-    // Middle against middle, as the steps are.
-    if (low + high < (chartLow[i - 1] as number) + (chartHigh[i - 1] as number)) chartFalls = true;
-    if (garment < (finished[i - 1] as number)) sewnFalls = true;
+    if (s === 0 || s % perSize !== 0) continue;
+    // Size against size, and middle against middle as the steps are.
+    const b = i - perSize;
+    if (low + high < (chartLow[b] as number) + (chartHigh[b] as number)) chartFalls = true;
+    if (garment < (finished[b] as number)) sewnFalls = true;
   }
   if (charted === 0 && sewn === 0) return null;
   if (charted > 0 ? chartFalls : sewnFalls) return 'falls';
-  if (charted === sizes) return sewn === sizes ? 'both' : 'chart';
-  if (charted > 0 || sewn < sizes) return 'someSizes';
+  if (charted === places) return sewn === places ? 'both' : 'chart';
+  if (charted > 0 || sewn < places) return 'someSizes';
   return Number.isNaN(spec.targetMm) ? 'noTarget' : 'finished';
 }

@@ -1,5 +1,6 @@
 import type { PointId } from '../points/point-ids.ts';
 import type { FitGarment, FitPoint } from './fit-garment.ts';
+import type { SizeRow } from './fit.schema.ts';
 
 /**
  * What the pattern publishes at a point. `noTarget`: finished only, and the handbook has no ease to aim at; `falls`:
@@ -19,10 +20,17 @@ export interface ReckonedPoint {
   chooses: boolean;
 }
 
-/** Every figure of every point at every size, in mm, point after point; NaN where there is none. */
+/**
+ * Every figure of every point at every place, in mm, point after point; NaN where there is none. Places are the sizes,
+ * or the sizes and the lines half-way between them; inside the engine sizes are chosen by place, outside by position.
+ */
 export interface Reckoning {
   garment: FitGarment;
-  sizes: number;
+  /** How many places there are, and how many of them a size. */
+  places: number;
+  perSize: 1 | 2;
+  /** What stands at each place. */
+  rows: readonly SizeRow[];
   points: ReckonedPoint[];
   /** Governing or fitted points that the pattern gives and the person has not measured. */
   notMeasured: FitPoint[];

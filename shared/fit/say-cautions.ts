@@ -34,10 +34,6 @@ const SENTENCES: Record<CautionCode, Entry> = {
     tone: 'missing',
     say: () => 'Shrinkage is not reckoned yet: wash the cloth before you cut.',
   },
-  halfSizesNotReckoned: {
-    tone: 'missing',
-    say: () => 'Cutting between the lines is not reckoned yet: the plan keeps to whole sizes.',
-  },
   leanNotReckoned: {
     tone: 'missing',
     say: () => 'Closer or roomier by choice is not reckoned yet: the plan aims at the draft.',

@@ -1,7 +1,16 @@
 import { printLengthWithUnit } from '../units.ts';
-import type { Blend, FitOption, FitPlan, PointResult } from './fit.schema.ts';
+import type { Blend, FitOption, FitPlan, PointResult, SizeChoice } from './fit.schema.ts';
 import type { Verdict, ZoneId } from './fit-words.ts';
-import { capital, listWords, sayPoint, sayZone, VERDICT_WORDS, type SayContext } from './say-words.ts';
+import {
+  capital,
+  listWords,
+  sayInSize,
+  sayPoint,
+  saySize,
+  sayZone,
+  VERDICT_WORDS,
+  type SayContext,
+} from './say-words.ts';
 import { sayZones } from './say-plan.ts';
 
 /** Where on a seam a zone's line is left or met, in trade words. */
@@ -26,15 +35,19 @@ export function sayBlend(blend: Blend, context: SayContext): { title: string; wo
 /** The branches join their own pieces to the shoulder's, so they are cut differently from a side seam. */
 function sayCrossing({ fromZone, toZone, from, to }: Blend): string {
   const has = (zone: ZoneId) => fromZone === zone || toZone === zone;
-  const branchLabel = (zone: ZoneId) => (fromZone === zone ? from.label : to.label);
-  const otherLabel = (zone: ZoneId) => (fromZone === zone ? to.label : from.label);
+  const branch = (zone: ZoneId) => (fromZone === zone ? from : to);
+  const other = (zone: ZoneId) => (fromZone === zone ? to : from);
   if (has('neck')) {
-    return `Cut the neckline, and the collar or facing with it, in ${branchLabel('neck')}; meet the ${otherLabel('neck')} line along the shoulder seam`;
+    return `Cut the neckline, and the collar or facing with it, ${sayInSize(branch('neck'))}; meet the ${sayLine(other('neck'))} along the shoulder seam`;
   }
   if (has('sleeve')) {
-    return `Keep the sleeve cap in ${otherLabel('sleeve')} to go with the armhole; on the sleeve’s underarm seam leave that line and meet the ${branchLabel('sleeve')} line at the upper arm`;
+    return `Keep the sleeve cap ${sayInSize(other('sleeve'))} to go with the armhole; on the sleeve’s underarm seam leave that line and meet the ${sayLine(branch('sleeve'))} at the upper arm`;
   }
-  return `Leave the ${from.label} line at ${LEVELS[fromZone]} and meet the ${to.label} line at ${LEVELS[toZone]}`;
+  return `Leave the ${sayLine(from)} at ${LEVELS[fromZone]} and meet the ${sayLine(to)} at ${LEVELS[toZone]}`;
+}
+
+function sayLine(size: SizeChoice): string {
+  return size.between ? `line ${saySize(size)}` : `${size.label} line`;
 }
 
 function sayShift(blend: Blend, context: SayContext): string {
@@ -107,10 +120,20 @@ export function sayBeforeCutting(plan: FitPlan, context: SayContext, cloth = '')
     return `Sew a toile that takes in the ${sayPoint(result.point, context.chestWord)}: it${wanted}.`;
   });
   return [
+    ...sayLinesToDraw(plan),
     ...first,
     ...(tight.length > 0 ? [] : ['Sew a toile first where the cloth is dear or the pattern is new to you.']),
     ...(cloth.trim() === '' ? [] : [`The pattern is meant for ${cloth.trim().replace(/[.]$/, '')}.`]),
     'Fit in the cloth itself, or one that hangs like it: cloth of another weight sits differently.',
     'Measure the printed test square before you cut out the paper.',
+  ];
+}
+
+/** A line between the printed ones has to be drawn before it can be cut: the middle of the gap, joined (common practice). */
+function sayLinesToDraw({ zones }: FitPlan): string[] {
+  const between = [...new Set(zones.flatMap(({ size }) => (size.between ? [saySize(size)] : [])))];
+  if (between.length === 0) return [];
+  return [
+    `Draw the line${between.length > 1 ? 's' : ''} ${listWords(between)}: mark the middle of the gap at short intervals and at every corner and notch, and join the marks.`,
   ];
 }

@@ -1,15 +1,22 @@
 import { printLengthWithUnit } from '../units.ts';
-import type { Caution, FitPlan, ZonePlan } from './fit.schema.ts';
+import type { Caution, FitPlan, SizeChoice, ZonePlan } from './fit.schema.ts';
 import { ZONE_IDS, type Verdict, type ZoneId } from './fit-words.ts';
-import { listWords, sayPoint, sayVerdict, sayZone, type SayContext } from './say-words.ts';
+import {
+  listWords,
+  sayInSize,
+  sayPoint,
+  saySize,
+  sayVerdict,
+  sayZone,
+  type SayContext,
+} from './say-words.ts';
 
 /** Zones that leave the trunk of a garment instead of continuing down it. */
 const BRANCHES: readonly ZoneId[] = ['neck', 'sleeve'];
 
 /** Neighbouring zones of the trunk that are cut in the same size. */
 interface Run {
-  label: string;
-  position: number;
+  size: SizeChoice;
   zones: ZoneId[];
 }
 
@@ -30,9 +37,9 @@ export function sayZones(zones: readonly ZonePlan[], context: SayContext): strin
   const runs = trunkRuns(zones);
   const branches = branchesApart(zones);
   const first = runs[0];
-  if (!first) return listWords(branches.map((branch) => `the ${branch.zone} in ${branch.size.label}`));
+  if (!first) return listWords(branches.map((branch) => `the ${branch.zone} ${sayInSize(branch.size)}`));
   const apart = branches.map(
-    (branch) => `the ${sayZone(branch.zone, context.chestWord)} in ${branch.size.label}`,
+    (branch) => `the ${sayZone(branch.zone, context.chestWord)} ${sayInSize(branch.size)}`,
   );
   const trunk =
     runs.length === 1 ? sayOneSize(first, apart.length > 0) : sayRuns(first, runs.slice(1), context);
@@ -40,21 +47,21 @@ export function sayZones(zones: readonly ZonePlan[], context: SayContext): strin
 }
 
 function sayOneSize(run: Run, hasBranches: boolean): string {
-  return hasBranches ? run.label : `${run.label} throughout`;
+  return hasBranches ? saySize(run.size) : `${saySize(run.size)} throughout`;
 }
 
 function sayRuns(first: Run, rest: readonly Run[], context: SayContext): string {
   const zoneWord = (zone: ZoneId | undefined) => (zone ? sayZone(zone, context.chestWord) : '');
   const start =
     first.zones.length === 1
-      ? `${first.label} at the ${zoneWord(first.zones[0])}`
-      : `${first.label} to the ${zoneWord(first.zones.at(-1))}`;
+      ? `${saySize(first.size)} at the ${zoneWord(first.zones[0])}`
+      : `${saySize(first.size)} to the ${zoneWord(first.zones.at(-1))}`;
   // Steps in the same direction share their verb: run out to 14 at the waist and 16 from the hip down.
   const steps: { verb: string; places: string[] }[] = [];
   rest.forEach((run, index) => {
     const before = rest[index - 1] ?? first;
-    const verb = run.position > before.position ? 'run out' : 'come in';
-    const place = `${run.label} ${sayPlace(run, index === rest.length - 1, zoneWord)}`;
+    const verb = run.size.position > before.size.position ? 'run out' : 'come in';
+    const place = `${saySize(run.size)} ${sayPlace(run, index === rest.length - 1, zoneWord)}`;
     const last = steps.at(-1);
     if (last?.verb === verb) last.places.push(place);
     else steps.push({ verb, places: [place] });
@@ -79,8 +86,8 @@ function trunkRuns(zones: readonly ZonePlan[]): Run[] {
   for (const { zone, size } of inBodyOrder(zones)) {
     if (BRANCHES.includes(zone)) continue;
     const last = runs.at(-1);
-    if (last?.position === size.position) last.zones.push(zone);
-    else runs.push({ label: size.label, position: size.position, zones: [zone] });
+    if (last?.size.position === size.position) last.zones.push(zone);
+    else runs.push({ size, zones: [zone] });
   }
   return runs;
 }
@@ -111,9 +118,9 @@ function sayBeyond(plan: FitPlan, context: SayContext, cut: string): string {
       : []),
   ];
   if (parts.length === 0) return `This pattern’s sizes end before this body; the nearest is ${cut}.`;
-  const labels = new Set(plan.zones.map((zone) => zone.size.label));
+  const [only, ...others] = new Set(plan.zones.map((zone) => saySize(zone.size)));
   const beyond = parts.join('. ');
-  if (labels.size === 1) return `${beyond}: the nearest is ${plan.zones[0]?.size.label ?? ''}.`;
+  if (only !== undefined && others.length === 0) return `${beyond}: the nearest is ${only}.`;
   return `${beyond}. Nearest: cut ${cut}.`;
 }
 
@@ -142,7 +149,7 @@ function sayNotEnough(plan: FitPlan, context: SayContext): string {
 
 /** What a zone's node stands for. */
 export interface NodeChoice {
-  label: string;
+  size: SizeChoice;
   zone: ZoneId;
   /** Null where the zone has nothing to compare. */
   result: { easeMm: number | null; verdict: Verdict; leewayMm: number | null } | null;
@@ -150,9 +157,9 @@ export interface NodeChoice {
 }
 
 /** One zone's choice as a screen reader should say it: `16, hip: ease 6.0 cm, as drafted`. */
-export function sayNode({ label, zone, result, isHeld }: NodeChoice, context: SayContext): string {
+export function sayNode({ size, zone, result, isHeld }: NodeChoice, context: SayContext): string {
   const held = isHeld ? ', held' : '';
-  const start = `${label}, ${sayZone(zone, context.chestWord)}`;
+  const start = `${saySize(size)}, ${sayZone(zone, context.chestWord)}`;
   if (!result) return `${start}: nothing to compare${held}`;
   const ease =
     result.easeMm === null

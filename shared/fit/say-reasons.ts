@@ -2,7 +2,7 @@ import { printLengthWithUnit } from '../units.ts';
 import type { FitPlan, Reason } from './fit.schema.ts';
 import type { ReasonCode } from './fit-words.ts';
 import type { Said } from './say-cautions.ts';
-import { capital, listWords, sayPoint, sayZone, type SayContext } from './say-words.ts';
+import { capital, listWords, sayPoint, saySize, sayZone, type SayContext } from './say-words.ts';
 
 type Sentence = (reasons: readonly Reason[], plan: FitPlan, context: SayContext) => string;
 
@@ -11,8 +11,8 @@ const SENTENCES: Record<ReasonCode, Sentence> = {
   held: (reasons, plan, context) =>
     `Held by you: ${listWords(
       reasons.flatMap(({ zone }) => {
-        const label = plan.zones.find((choice) => choice.zone === zone)?.size.label;
-        return zone && label !== undefined ? [`${sayZone(zone, context.chestWord)} ${label}`] : [];
+        const size = plan.zones.find((choice) => choice.zone === zone)?.size;
+        return zone && size ? [`${sayZone(zone, context.chestWord)} ${saySize(size)}`] : [];
       }),
     )}. The rest is planned round it.`,
   oneSizeIsEnough: (reasons, _plan, context) =>

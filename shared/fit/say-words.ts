@@ -1,5 +1,6 @@
 import type { PointId } from '../points/point-ids.ts';
 import type { LengthUnit } from '../units.ts';
+import type { SizeChoice } from './fit.schema.ts';
 import type { GarmentKind, Silhouette, Verdict, ZoneId } from './fit-words.ts';
 
 /** How somebody wants to be spoken to: unit, their own word for the bust, and the pattern's size labels in grade order. */
@@ -26,6 +27,16 @@ export function sayVerdict(result: { verdict: Verdict; leewayMm: number | null }
   if (result.verdict === 'unknown' && result.leewayMm !== null && result.leewayMm >= 0)
     return 'has wearing ease';
   return VERDICT_WORDS[result.verdict];
+}
+
+/** A size as it is said: `16`, or `halfway between 16 and 18`. */
+export function saySize({ label, between }: Pick<SizeChoice, 'label' | 'between'>): string {
+  return between ? `halfway between ${between.smaller} and ${between.larger}` : label;
+}
+
+/** The same after a verb, with its preposition where it wants one: `in 16`, `at 16`, `halfway between 16 and 18`. */
+export function sayInSize(size: SizeChoice, word = 'in'): string {
+  return size.between ? saySize(size) : `${word} ${size.label}`;
 }
 
 /** The five silhouettes as a sewist says them after "in the … dress,". */

@@ -8,12 +8,12 @@ import type { ZoneCosts } from './zone-costs.ts';
 import { groupZones } from './zone-groups.ts';
 import type { ZoneGroups } from './zone-groups.ts';
 
-/** For patterns of any usual length, worked out once. */
-const JOIN_COSTS = joinCosts(200);
+/** For patterns of any usual length, worked out once: of whole sizes, and of halves. */
+const JOIN_COSTS = { 1: joinCosts(200, 1), 2: joinCosts(400, 2) } as const;
 
-/** A size for every zone, by the garment's zone order, and what it costs with the pull of loose points. */
+/** A place for every zone, by the garment's zone order, and what it costs with the light pulls. */
 export interface ZoneChoice {
-  positions: number[];
+  places: number[];
   cost: number;
 }
 
@@ -43,11 +43,11 @@ export function chooseZones(reckoning: Reckoning, zones: ZoneCosts, held: FitInp
 
 function spread(choice: TreeChoice | null, groups: ZoneGroups): ZoneChoice | null {
   if (choice === null || choice.cost === Infinity) return null;
-  return { positions: groups.of.map((group) => choice.states[group] ?? 0), cost: choice.cost };
+  return { places: groups.of.map((group) => choice.states[group] ?? 0), cost: choice.cost };
 }
 
-function joinCosts(sizes: number): number[] {
-  return Array.from({ length: sizes }, (_, apart) => joinCost(apart));
+function joinCosts(places: number, perSize: number): number[] {
+  return Array.from({ length: places }, (_, apart) => joinCost(apart / perSize));
 }
 
 function makeProblem(
@@ -56,23 +56,24 @@ function makeProblem(
   groups: ZoneGroups,
   fixed: readonly (number | undefined)[],
 ): TreeProblem {
-  const { sizes } = reckoning;
-  const grouped = zeros(groups.parents.length * sizes);
+  const { places, perSize } = reckoning;
+  const known = JOIN_COSTS[perSize];
+  const grouped = zeros(groups.parents.length * places);
   for (let zone = 0; zone < fixed.length; zone++) {
-    const from = zone * sizes;
-    const to = (groups.of[zone] ?? 0) * sizes;
-    const only = fixed[zone];
-    for (let s = 0; s < sizes; s++) {
-      const isForbidden = only !== undefined && only !== s;
+    const from = zone * places;
+    const to = (groups.of[zone] ?? 0) * places;
+    const only = (fixed[zone] ?? NaN) * perSize;
+    for (let s = 0; s < places; s++) {
+      const isForbidden = !Number.isNaN(only) && only !== s;
       grouped[to + s] = isForbidden ? Infinity : (grouped[to + s] as number) + (costs[from + s] as number);
     }
   }
   return {
     parents: groups.parents,
-    states: sizes,
+    states: places,
     costs: grouped,
-    limits: groups.limits,
-    joinCosts: sizes <= JOIN_COSTS.length ? JOIN_COSTS : joinCosts(sizes),
+    limits: perSize === 1 ? groups.limits : groups.limits.map((limit) => limit * perSize),
+    joinCosts: places <= known.length ? known : joinCosts(places, perSize),
     joinWeights: groups.weights,
     overLimit: Infinity,
     tie: TIE,

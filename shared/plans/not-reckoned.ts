@@ -1,3 +1,4 @@
+import { placesPerSize } from '../fit/between-lines.ts';
 import { zonesOf } from '../fit/garments.ts';
 import type { PatternInput, PatternTable } from '../patterns/patterns.schema.ts';
 import type { FieldProblem } from '../problem.ts';
@@ -24,12 +25,7 @@ export function refuseOptions(
       '/options/lean',
       'Closer or roomier than drafted is not reckoned yet: leave it out.',
     ),
-    ...refuse(
-      options.cutBetweenLines === true,
-      '/options/cutBetweenLines',
-      'Sizes between the lines are not reckoned yet: leave this out.',
-    ),
-    ...refuseHeld(options.held, zonesOf(pattern.kind), table.sizes.length),
+    ...refuseHeld(options, zonesOf(pattern.kind), table.sizes.length),
   ];
 }
 
@@ -66,7 +62,9 @@ function refuseFabric(
   ];
 }
 
-function refuseHeld(held: PlanOptions['held'], zones: readonly string[], sizes: number): FieldProblem[] {
+function refuseHeld(options: PlanOptions, zones: readonly string[], sizes: number): FieldProblem[] {
+  const { held, cutBetweenLines } = options;
+  const perSize = placesPerSize({ cutBetweenLines });
   return Object.entries(held ?? {}).flatMap(([zone, position]) => [
     ...refuse(
       !zones.includes(zone),
@@ -74,9 +72,11 @@ function refuseHeld(held: PlanOptions['held'], zones: readonly string[], sizes: 
       'This garment is not fitted there: leave it out.',
     ),
     ...refuse(
-      !Number.isInteger(position),
+      !Number.isInteger(position * perSize),
       `/options/held/${zone}`,
-      'Sizes between the lines are not reckoned yet: give a whole number.',
+      perSize === 1
+        ? 'The plan keeps to the lines: give a whole number, or let it cut between them.'
+        : 'Give a size, or the place half-way between two: a whole number, or one with a half.',
     ),
     ...refuse(
       position > sizes - 1,

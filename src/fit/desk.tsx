@@ -17,7 +17,7 @@ import { readHeld, writeHeld } from './fit-address.ts';
 import { FitView } from './parts/fit-view.tsx';
 import { groundOf, planHeld, type Held } from './parts/fitting.ts';
 import { ProfileSection } from './parts/profile-section.tsx';
-import { Fast, Setting, SilhouetteWord, WithComma } from './parts/setting.tsx';
+import { Fast, LinesWord, Setting, SilhouetteWord, WithComma } from './parts/setting.tsx';
 import { SavePlan } from './save-plan.tsx';
 import { saysTheSame } from './same-plan.ts';
 import { MeasuredWord, PatternWord, PersonWord, useSettingChange } from './setting-choosers.tsx';
@@ -26,16 +26,20 @@ interface DeskProps {
   setId: string;
   revisionId: string;
   silhouette: Silhouette | null;
+  isBetween: boolean;
   hold: readonly string[];
 }
 
 /** One setting and its answer. The browser reckons at once; the server's answer is the one that counts. */
-export function Desk({ setId, revisionId, silhouette, hold }: DeskProps) {
+export function Desk({ setId, revisionId, silhouette, isBetween, hold }: DeskProps) {
   const { data: set } = useSuspenseQuery(measurementSetQuery(setId));
   const { data: person } = useSuspenseQuery(personQuery(set.personId));
   const { data: revision } = useSuspenseQuery(revisionQuery(revisionId));
   const { data: pattern } = useSuspenseQuery(patternQuery(revision.patternId));
-  const options: PlanOptions = silhouette === null ? {} : { silhouette };
+  const options: PlanOptions = {
+    ...(silhouette !== null && { silhouette }),
+    ...(isBetween && { cutBetweenLines: true }),
+  };
   const fit = useQuery(fitQuery({ measurementSetId: setId, revisionId, options }));
   const change = useSettingChange();
   return (
@@ -59,7 +63,11 @@ export function Desk({ setId, revisionId, silhouette, hold }: DeskProps) {
             onChange={(next) => change({ silhouette: next === pattern.silhouette ? null : next })}
           />
         </WithComma>{' '}
-        of <Fast>{pattern.structure === 'knit' ? 'a knit' : 'woven cloth'}</Fast>
+        of{' '}
+        <WithComma>
+          <Fast>{pattern.structure === 'knit' ? 'a knit' : 'woven cloth'}</Fast>
+        </WithComma>{' '}
+        <LinesWord isBetween={isBetween} onChange={(next) => change({ cut: next ? 'between' : null })} />
       </Setting>
       {revision.id !== pattern.latestRevisionId && (
         <p className="mt-2 text-note text-ink-2">
@@ -122,7 +130,9 @@ function Reckoned({ answer, request, speech, hold, name, cloth }: ReckonedProps)
   const { unit, chestWord } = speech;
   const ground = useMemo(() => groundOf(answer.input, { unit, chestWord }), [answer.input, unit, chestWord]);
   const zones = ground.plan.zones.map(({ zone }) => zone);
-  const [held, setHeld] = useState<Held>(() => readHeld(hold, ground.context.sizes, zones));
+  const [held, setHeld] = useState<Held>(() =>
+    readHeld(hold, ground.context.sizes, zones, ground.perSize > 1),
+  );
   const settled = useSettled(held, 400);
   useHeldInAddress(settled, ground.context.sizes);
   const isHeld = Object.keys(settled).length > 0;

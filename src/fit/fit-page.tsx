@@ -38,17 +38,18 @@ export function Component() {
   const [search] = useSearchParams();
   const { data: people } = useSuspenseQuery(peopleQuery());
   const { data: patterns } = useSuspenseQuery(patternsQuery());
-  const { setId, revisionId, silhouette, hold } = readFitAddress(search);
+  const { setId, revisionId, silhouette, isBetween, hold } = readFitAddress(search);
   if (people.total === 0) return <NobodyYet />;
   if (patterns.total === 0) return <NoPatternYet />;
   if (setId === null || revisionId === null) return <ChooseFirst setId={setId} revisionId={revisionId} />;
   return (
     <Desk
-      // Another person, pattern or silhouette is another plan: nothing stays held from the one before.
-      key={`${setId} ${revisionId} ${silhouette ?? ''}`}
+      // Another person, pattern, silhouette or way to cut is another plan: nothing stays held from the one before.
+      key={`${setId} ${revisionId} ${silhouette ?? ''} ${isBetween}`}
       setId={setId}
       revisionId={revisionId}
       silhouette={silhouette}
+      isBetween={isBetween}
       hold={hold}
     />
   );

@@ -4,7 +4,7 @@ import { buildFitInput } from '../../shared/fit/build-fit-input.ts';
 import type { Silhouette } from '../../shared/fit/fit-words.ts';
 import { FitView } from '../fit/parts/fit-view.tsx';
 import { groundOf, planHeld, type Held } from '../fit/parts/fitting.ts';
-import { Fast, Setting, SilhouetteWord, WithComma } from '../fit/parts/setting.tsx';
+import { Fast, LinesWord, Setting, SilhouetteWord, WithComma } from '../fit/parts/setting.tsx';
 import { printDay } from '../ui/day.ts';
 import { SentenceSelect } from '../ui/sentence-select.tsx';
 
@@ -13,6 +13,7 @@ export function DemoPlan() {
   const [personAt, setPersonAt] = useState(0);
   const [patternAt, setPatternAt] = useState(0);
   const [silhouette, setSilhouette] = useState<Silhouette | null>(null);
+  const [cutBetweenLines, setBetween] = useState(false);
   const [held, setHeld] = useState<Held>({});
   const person = frontPagePeople[personAt];
   const chosen = frontPagePatterns[patternAt];
@@ -23,10 +24,10 @@ export function DemoPlan() {
       takenBy: person.takenBy,
       pattern: chosen.pattern,
       table: chosen.table,
-      options: silhouette === null ? {} : { silhouette },
+      options: { cutBetweenLines, ...(silhouette !== null && { silhouette }) },
     });
     return groundOf(input, { unit: person.unit, chestWord: person.chestWord });
-  }, [person, chosen, silhouette]);
+  }, [person, chosen, silhouette, cutBetweenLines]);
   const plan = useMemo(() => (ground ? planHeld(ground, held) : null), [ground, held]);
   if (!person || !chosen || !ground || !plan) return null;
   const change = (apply: () => void) => {
@@ -69,7 +70,11 @@ export function DemoPlan() {
             onChange={(next) => change(() => setSilhouette(next))}
           />
         </WithComma>{' '}
-        of <Fast>woven cloth</Fast>
+        of{' '}
+        <WithComma>
+          <Fast>woven cloth</Fast>
+        </WithComma>{' '}
+        <LinesWord isBetween={cutBetweenLines} onChange={(next) => change(() => setBetween(next))} />
       </Setting>
       <FitView
         ground={ground}

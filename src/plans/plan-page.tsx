@@ -53,6 +53,11 @@ export function Component() {
             </>
           )}
           , of <Fast>{saved.input.fabric.structure === 'woven' ? 'woven cloth' : 'a knit'}</Fast>
+          {saved.input.cutBetweenLines === true && (
+            <>
+              , cut <Fast>also between the lines</Fast>
+            </>
+          )}
         </Setting>
       </div>
       <FitView
@@ -154,6 +159,7 @@ function Since({ saved, person, pattern }: { saved: SavedPlan; person: Person; p
         ]),
   ];
   const search = new URLSearchParams({ set: setId, revision: pattern.latestRevisionId });
+  if (saved.input.cutBetweenLines === true) search.set('cut', 'between');
   return (
     <div className="text-note text-ink-2">
       <p>

@@ -74,6 +74,18 @@ describe('the fit plan: what it answers', () => {
     expect(body.plan.reasons).toContainEqual(expect.objectContaining({ code: 'held', zone: 'hip' }));
   });
 
+  it('plans between the lines where it is asked to, and takes a half that is held', async () => {
+    const { body } = (await ask({ cutBetweenLines: true, held: { hip: 1.5 } }).expect(200)) as {
+      body: FitAnswer;
+    };
+    expect(body.plan.zones.find(({ zone }) => zone === 'hip')?.size).toEqual({
+      label: '12–14',
+      position: 1.5,
+      between: { smaller: '12', larger: '14' },
+    });
+    expect(body.plan).toEqual(planFit(body.input));
+  });
+
   it('says of a pattern drafted for a knit that it does not reckon with it yet', async () => {
     const knit = await insertPattern(test.db, ada.user.id, { structure: 'knit', kind: 'knitTop' });
     const { body } = (await ask({}, { revisionId: knit.revisionId }).expect(200)) as { body: FitAnswer };
@@ -103,19 +115,20 @@ describe('the fit plan: what it refuses in words', () => {
   it.each([
     [{ layers: [{ name: 'shirt', thicknessMm: 1 }] }, ['/options/layers']],
     [{ lean: 'roomier' }, ['/options/lean']],
-    [{ cutBetweenLines: true }, ['/options/cutBetweenLines']],
     [{ fabric: { structure: 'knit' } }, ['/options/fabric/structure']],
     [{ fabric: { structure: 'woven', stretch: 0.1 } }, ['/options/fabric/stretch']],
     [{ fabric: { structure: 'woven', shrinkLengthwise: 0.05 } }, ['/options/fabric/shrinkLengthwise']],
     [{ fabric: { structure: 'woven', shrinkCrosswise: -0.01 } }, ['/options/fabric/shrinkCrosswise']],
     [{ held: { hip: 4 } }, ['/options/held/hip']],
     [{ held: { hip: 1.5 } }, ['/options/held/hip']],
+    [{ cutBetweenLines: true, held: { hip: 1.25 } }, ['/options/held/hip']],
+    [{ cutBetweenLines: true, held: { hip: 3.5 } }, ['/options/held/hip']],
     [{ held: { hip: -1 } }, ['/options/held/hip']],
     [{ held: { nose: 1 } }, ['/options/held/nose']],
     [{ silhouette: 'tight' }, ['/options/silhouette']],
     [
-      { lean: 'closer', held: { bust: 9 }, cutBetweenLines: true },
-      ['/options/lean', '/options/cutBetweenLines', '/options/held/bust'],
+      { lean: 'closer', held: { bust: 9, hip: 0.5 }, cutBetweenLines: false },
+      ['/options/lean', '/options/held/bust', '/options/held/hip'],
     ],
   ])('%j', async (options, pointers) => {
     const { body } = await ask(options).expect(422);

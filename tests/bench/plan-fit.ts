@@ -51,8 +51,10 @@ export function run(): Promise<Figure[]> {
   const zones = planFit(benchInput()).zones;
   const positions = Object.fromEntries(zones.map(({ zone, size }) => [zone, size.position]));
   const reference = 'a plain loop over the same cells that adds up (body - chart)² and nothing else';
-  const [plan, at, profile, plain] = medians([
+  const halves = inputs.map((input): FitInput => ({ ...input, cutBetweenLines: true }));
+  const [plan, between, at, profile, plain] = medians([
     (round) => planFit(inputs[round % inputs.length] ?? benchInput()),
+    (round) => planFit(halves[round % halves.length] ?? benchInput()),
     (round) => evaluateAt(inputs[round % inputs.length] ?? benchInput(), positions),
     (round) => easeProfile(inputs[round % inputs.length] ?? benchInput()),
     (round) => plainLoop(inputs[round % inputs.length] ?? benchInput()),
@@ -66,6 +68,7 @@ export function run(): Promise<Figure[]> {
   });
   return Promise.resolve([
     figure('planFit, 20 sizes × 12 points × 9 zones, median', plan ?? NaN),
+    figure('planFit by half sizes, 39 places × 12 points × 9 zones, median', between ?? NaN),
     figure('evaluateAt, 20 sizes × 12 points × 9 zones, median', at ?? NaN),
     figure('easeProfile, 20 sizes × 12 points × 9 zones, median', profile ?? NaN),
   ]);

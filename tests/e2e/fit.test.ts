@@ -20,7 +20,7 @@ const slider = (page: Page, zone: string) => page.getByRole('slider', { name: `S
 const confirmed = (page: Page) => page.getByText(/^Confirmed by the server/);
 
 /** The demo's Tilde in the demo's dress of fourteen sizes. */
-async function openDress(options: VisitOptions & { hold?: string } = {}): Promise<Page> {
+async function openDress(options: VisitOptions & { hold?: string; cut?: string } = {}): Promise<Page> {
   const page = await visit.open(paths.people, { as: 'member', ...options });
   const people = peopleSchema.parse(await (await page.request.get('/api/people')).json());
   const patterns = patternsSchema.parse(await (await page.request.get('/api/patterns')).json());
@@ -28,6 +28,7 @@ async function openDress(options: VisitOptions & { hold?: string } = {}): Promis
     set: people.items.find(({ name }) => name === 'Tilde')!.latestSetId,
     revision: patterns.items.find(({ title }) => title === 'Sluice dress')!.latestRevisionId,
     ...(options.hold && { hold: options.hold }),
+    ...(options.cut && { cut: options.cut }),
   });
   await page.goto(`${paths.fit}?${search.toString()}`);
   await slider(page, 'hip').waitFor();
@@ -166,6 +167,93 @@ describe('the fit view', () => {
     await page.getByRole('link', { name: 'Plan it anew' }).click();
     await slider(page, 'hip').waitFor();
     expect(new URL(page.url()).searchParams.get('set')).toBe(tilde.latestSetId);
+  });
+});
+
+describe('the fit view, cut between the lines', () => {
+  it('is a word of the setting, stands in the address, and is confirmed by the server', async () => {
+    const page = await openDress();
+    expect(await answer(page).innerText()).not.toContain('halfway');
+    await page.getByLabel('Cutting lines').selectOption('between');
+    await page.waitForURL(/cut=between/);
+    await page.getByRole('heading', { level: 1, name: /halfway between \d+ and \d+/ }).waitFor();
+    const said = await answer(page).innerText();
+    await confirmed(page).waitFor();
+    await expectAccessible(page);
+    await page.reload();
+    await slider(page, 'hip').waitFor();
+    expect(await answer(page).innerText()).toBe(said);
+    await page.getByLabel('Cutting lines').selectOption('along');
+    await page.waitForURL((url) => !url.searchParams.has('cut'));
+    await page.getByRole('heading', { level: 1, name: /^Cut (?!.*halfway)/ }).waitFor();
+  });
+
+  it('stops at half sizes by key and by pointer, keeps them in the address, and says them in the table', async () => {
+    const page = await openDress({ cut: 'between', hold: 'hip:18' });
+    const hip = slider(page, 'hip');
+    const was = Number(await hip.getAttribute('aria-valuenow'));
+    await hip.focus();
+    await page.keyboard.press('ArrowRight');
+    expect(Number(await hip.getAttribute('aria-valuenow'))).toBe(was + 0.5);
+    expect(await hip.getAttribute('aria-valuetext')).toMatch(/^halfway between 18 and 20, hip: .*, held$/);
+    expect(await page.getByText('You hold the hip halfway between 18 and 20.').count()).toBe(1);
+    await page.waitForURL((url) => url.searchParams.get('hold') === 'hip:18–20');
+    await confirmed(page).waitFor();
+    await page.reload();
+    await hip.waitFor();
+    expect(Number(await hip.getAttribute('aria-valuenow'))).toBe(was + 0.5);
+
+    await hip.scrollIntoViewIfNeeded();
+    const box = (await hip.boundingBox())!;
+    const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
+    await page.mouse.move(x, y);
+    await page.mouse.down();
+    await page.mouse.move(x - 44, y, { steps: 8 });
+    await page.mouse.up();
+    expect(Number(await hip.getAttribute('aria-valuenow'))).toBe(was - 0.5);
+    await page.getByText('The same as a table').click();
+    const cells = await page.getByRole('row', { name: /^Hip/ }).getByRole('cell').allInnerTexts();
+    expect(cells[1]).toBe('16–18, held');
+    expect(await page.getByText(/^Draw the lines? .*halfway between 16 and 18/).count()).toBe(1);
+  });
+
+  it('stays accessible on the phone, and draws the ease with a place between two sizes', async () => {
+    const page = await openDress({ viewport: PHONE, cut: 'between', hold: 'hip:18–20' });
+    await page.getByRole('heading', { name: /^Ease in every size/ }).scrollIntoViewIfNeeded();
+    await page.getByLabel('Point', { exact: true }).selectOption('hip');
+    await page.locator('.recharts-label', { hasText: '18–20' }).waitFor();
+    await expectAccessible(page);
+  });
+
+  it('holds nothing between the lines where it is cut along them', async () => {
+    const page = await openDress({ hold: 'hip:18–20' });
+    expect(await page.getByText(/^You hold/).count()).toBe(0);
+    expect(await answer(page).innerText()).not.toContain('halfway');
+  });
+
+  it('is kept by a saved plan, and said in the list of plans', async () => {
+    const page = await openDress({ cut: 'between', hold: 'hip:18–20' });
+    const said = await answer(page).innerText();
+    expect(said).toContain('halfway between 18 and 20');
+    const search = new URL(page.url()).searchParams;
+    const saved = await page.request.post('/api/plans', {
+      headers: { origin: visit.baseURL },
+      data: {
+        name: 'Between the lines',
+        measurementSetId: search.get('set'),
+        revisionId: search.get('revision'),
+        options: { cutBetweenLines: true, held: { hip: 6.5 } },
+      },
+    });
+    const { id } = idSchema.parse(await saved.json());
+    await page.goto(paths.plan(id));
+    await page.getByText('also between the lines').waitFor();
+    expect(await page.getByRole('heading', { level: 2 }).first().innerText()).toBe(said);
+    await page.goto(`${paths.plans}?q=Between`);
+    await page
+      .getByText(/halfway between 18 and 20/)
+      .first()
+      .waitFor();
   });
 });
 

@@ -46,6 +46,22 @@ describe('the front page', () => {
     expect(await answer(page).innerText()).toBe(before);
   });
 
+  it('cuts between the lines where it is told to', async () => {
+    const page = await visit.open('/');
+    const before = await answer(page).innerText();
+    const hip = slider(page, 'hip');
+    await page.getByLabel('Cutting lines').selectOption('between');
+    expect(await answer(page).innerText()).toMatch(/halfway between \d+ and \d+/);
+    await hip.focus();
+    await page.keyboard.press('Home');
+    await page.keyboard.press('ArrowRight');
+    expect(await hip.getAttribute('aria-valuetext')).toMatch(/^halfway between 6 and 8, hip: .*, held$/);
+    await page.keyboard.press('End');
+    expect(await hip.getAttribute('aria-valuenow')).toBe('13');
+    await page.getByLabel('Cutting lines').selectOption('along');
+    expect(await answer(page).innerText()).toBe(before);
+  });
+
   it('holds fourteen sizes on a phone without scrolling sideways, with targets of 44 px', async () => {
     const page = await visit.open('/', { viewport: PHONE });
     await slider(page, 'hip').waitFor();

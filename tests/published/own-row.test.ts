@@ -28,9 +28,14 @@ function garmentsFor(sizes: readonly SizeRow[]): FitInput['garment'][] {
 }
 
 /** Everything that is not the row's own size, in words; empty where all is well. */
-function strayFrom(garment: FitInput['garment'], sizes: SizeRow[], chart: readonly SizeRow[]): string[] {
+function strayFrom(
+  garment: FitInput['garment'],
+  sizes: SizeRow[],
+  chart: readonly SizeRow[],
+  more: Partial<FitInput> = {},
+): string[] {
   return chart.flatMap((row, position) => {
-    const plan = planFit(fitInput(garment, sizes, bodyOf(row)));
+    const plan = planFit(fitInput(garment, sizes, bodyOf(row), more));
     const said = `${garment.kind}, ${garment.silhouette}, ${garment.worn}, size ${row.label}`;
     const zones = plan.zones.filter(({ size }) => size.position !== position);
     const points = plan.points.filter(({ verdict }) => verdict !== 'asDrafted');
@@ -61,6 +66,17 @@ describe.each(TABLES)('%s', (_name, fixture, rows) => {
     (ease) => {
       const sizes = withEase(chart, () => ease);
       expect(garmentsFor(chart).flatMap((garment) => strayFrom(garment, sizes, chart))).toEqual([]);
+    },
+  );
+
+  it.each([0, 60, 300])(
+    'does so where it may be cut between the lines too, drafted at %d mm of ease',
+    (ease) => {
+      const between = { cutBetweenLines: true };
+      const sizes = withEase(chart, () => ease);
+      const garments = garmentsFor(chart);
+      expect(garments.flatMap((garment) => strayFrom(garment, sizes, chart, between))).toEqual([]);
+      expect(garments.flatMap((garment) => strayFrom(garment, chart, chart, between))).toEqual([]);
     },
   );
 

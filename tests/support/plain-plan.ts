@@ -48,6 +48,23 @@ const low = (value: Measured) => (typeof value === 'number' ? value : value.low)
 const high = (value: Measured) => (typeof value === 'number' ? value : value.high);
 const middle = (value: Measured) => (low(value) + high(value)) / 2;
 
+/** Between two values the mean, of ranges end by end; none unless both are there. */
+function between(a: Measured | undefined, b: Measured | undefined): Measured | undefined {
+  if (a === undefined || b === undefined) return undefined;
+  if (typeof a === 'number' && typeof b === 'number') return (a + b) / 2;
+  return { low: (low(a) + low(b)) / 2, high: (high(a) + high(b)) / 2 };
+}
+
+/** A column at every size, or with the half sizes between them where it is cut between the lines. */
+function everyPlace(
+  input: FitInput,
+  column: (size: FitInput['sizes'][number]) => Measured | undefined,
+): (Measured | undefined)[] {
+  const values = input.sizes.map(column);
+  if (input.cutBetweenLines !== true) return values;
+  return values.flatMap((value, at) => (at === 0 ? [value] : [between(values[at - 1], value), value]));
+}
+
 /**
  * The least cost of any plan of a fitted dress, by trying every one: the design's formulas written down once more, as
  * plainly as can be and apart from the engine, for the points above. Null where no point chooses.
@@ -58,17 +75,22 @@ export function plainLeastCost(input: FitInput): number | null {
   const speaks = new Set(
     measured.filter((point) => choosesAt(input, point) || point.wearing !== null).map(({ zone }) => zone),
   );
-  const costs = measured.map((point) => input.sizes.map((_, size) => plainCost(input, point, size)));
+  const perSize = input.cutBetweenLines === true ? 2 : 1;
+  const places = Array.from(
+    { length: (input.sizes.length - 1) * perSize + 1 },
+    (_, place) => place / perSize,
+  );
+  const costs = measured.map((point) => places.map((place) => plainCost(input, point, place)));
   let least = Infinity;
-  for (const sizes of assignments(input.sizes.length)) {
-    const at = Object.fromEntries(ZONES.map((zone, index) => [zone, sizes[index] ?? 0])) as Record<
+  for (const taken of assignments(places.length)) {
+    const at = Object.fromEntries(ZONES.map((zone, index) => [zone, taken[index] ?? 0])) as Record<
       ZoneId,
       number
     >;
     if (!follows(speaks, at)) continue;
     let cost = 0;
     for (const [from, to, limit, share] of JOINS) {
-      const apart = Math.abs(at[from] - at[to]);
+      const apart = Math.abs(at[from] - at[to]) / perSize;
       cost += apart > limit ? Infinity : apart === 0 ? 0 : share * (0.6 + 0.2 * apart ** 2);
     }
     if (cost >= least) continue;
@@ -97,19 +119,25 @@ function choosesAt(input: FitInput, { point, target }: PlainPoint): boolean {
 
 function plainCost(input: FitInput, plain: PlainPoint, s: number): number {
   const { point, wearing, target } = plain;
+  const perSize = input.cutBetweenLines === true ? 2 : 1;
   const charts = input.sizes.map((size) => size.body[point]);
   const sewn = input.sizes.map((size) => size.finished[point]);
   const body = input.body[point] ?? NaN;
-  const chart = charts[s];
-  const garment = sewn[s];
+  const chart = everyPlace(input, (size) => size.body[point])[s * perSize];
+  const sewnHere = everyPlace(input, (size) => size.finished[point])[s * perSize];
+  const garment = sewnHere === undefined ? undefined : middle(sewnHere);
   const liked = body + (input.preferenceMm?.[point] ?? 0);
   let deviation: number | null = null;
   if (chart !== undefined) {
     deviation = liked > high(chart) ? liked - high(chart) : liked < low(chart) ? liked - low(chart) : 0;
   } else if (target !== null && garment !== undefined) deviation = liked + target - garment;
   const scale = charts.map((value, index) => (value === undefined ? (sewn[index] ?? NaN) : middle(value)));
-  const down = s > 0 ? (scale[s] ?? NaN) - (scale[s - 1] ?? NaN) : Infinity;
-  const up = s < scale.length - 1 ? (scale[s + 1] ?? NaN) - (scale[s] ?? NaN) : Infinity;
+  // Between two sizes both neighbours are those two: the distance between them on either side.
+  const gap = (from: number, to: number) =>
+    from < 0 || to >= scale.length ? Infinity : (scale[to] ?? NaN) - (scale[from] ?? NaN);
+  const isWhole = Number.isInteger(s);
+  const down = isWhole ? gap(s - 1, s) : gap(Math.floor(s), Math.ceil(s));
+  const up = isWhole ? gap(s, s + 1) : down;
   const side = (deviation ?? 0) < 0 ? [down, up] : [up, down];
   const step = Math.max(plain.leastStep, side.find((gap) => gap !== Infinity) ?? 50);
   const capped = chart !== undefined && garment !== undefined ? garment - high(chart) : Infinity;

@@ -63,7 +63,7 @@ export function Cutting({ plan, context }: { plan: FitPlan; context: SayContext 
     <section>
       <SectionHeading>Where to change line</SectionHeading>
       {plan.blends.length === 0 ? (
-        <p className="mt-3 text-note text-ink-2">Nowhere: one size runs from top to bottom.</p>
+        <p className="mt-3 text-note text-ink-2">Nowhere: one line runs from top to bottom.</p>
       ) : (
         <ol className="mt-3 divide-y divide-rule border-y border-rule">
           {plan.blends.map((blend) => {

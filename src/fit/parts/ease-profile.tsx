@@ -24,16 +24,16 @@ const TICK = { fontSize: 13, fill: 'var(--ink-2)' };
 
 /** One point's ease in every size: the cloth's dashed line over the body's solid one, the room between them filled. */
 export function EaseProfile({ result, ladder, context }: EaseProfileProps) {
-  const { floorMm, size } = result;
+  const { easeMm, floorMm, size } = result;
   const isCalm = window.matchMedia('(prefers-reduced-motion: reduce)').matches;
   const data = ladder.map((mm, position) => ({
-    size: context.sizes[position] ?? '',
+    position,
     mm,
     room: mm === null || mm < (floorMm ?? 0) ? null : [floorMm ?? 0, mm],
   }));
   const domain = easeDomain([...ladder, floorMm]);
   const ticks = easeTicks(domain, HEIGHT, context.unit, 40);
-  const chosen = ladder[size.position] ?? null;
+  const last = ladder.length - 1;
   const label = (value: string, fill = 'var(--ink)') => ({
     value,
     position: 'insideBottomRight' as const,
@@ -49,7 +49,11 @@ export function EaseProfile({ result, ladder, context }: EaseProfileProps) {
       >
         <CartesianGrid vertical={false} stroke="var(--rule)" />
         <XAxis
-          dataKey="size"
+          dataKey="position"
+          type="number"
+          domain={[0, last]}
+          ticks={data.map(({ position }) => position)}
+          tickFormatter={(position: number) => context.sizes[position] ?? ''}
           tick={TICK}
           tickLine={false}
           axisLine={false}
@@ -93,15 +97,22 @@ export function EaseProfile({ result, ladder, context }: EaseProfileProps) {
           }
           isAnimationActive={!isCalm}
         />
-        {chosen !== null && (
+        {easeMm !== null && (
           <ReferenceDot
-            x={size.label}
-            y={chosen}
+            x={size.position}
+            y={easeMm}
             r={7}
             fill="var(--paper)"
             stroke="var(--woad)"
             strokeWidth={2.5}
-            label={{ value: size.label, position: 'top', fontSize: 14, fontWeight: 700, fill: 'var(--ink)' }}
+            label={{
+              value: size.label,
+              position: 'top',
+              dx: -6,
+              fontSize: 14,
+              fontWeight: 700,
+              fill: 'var(--ink)',
+            }}
           />
         )}
       </ComposedChart>

@@ -37,7 +37,7 @@ export function FitTable({ plan, held, context }: { plan: FitPlan; held: Held; c
 function Row({ row, isHeld, context }: { row: FitRow; isHeld: boolean; context: SayContext }) {
   const { result } = row;
   const zone = sayZone(row.zone, context.chestWord);
-  const size = `${row.label}${isHeld ? ', held' : ''}`;
+  const size = `${row.size.label}${isHeld ? ', held' : ''}`;
   if (!result) {
     return (
       <tr>

@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react';
 import type { FitPlan } from '../../../shared/fit/fit.schema.ts';
 import { sayPlan } from '../../../shared/fit/say-plan.ts';
-import { listWords, sayZone } from '../../../shared/fit/say-words.ts';
+import { listWords, sayInSize, sayZone } from '../../../shared/fit/say-words.ts';
 import { Watch } from './answer.tsx';
 import { BeforeCutting, Cutting, Options } from './beside.tsx';
 import { FitTable } from './fit-table.tsx';
@@ -58,7 +58,7 @@ export function FitView({
       </Steady>
       <div className="mt-3 mb-2 flex flex-wrap items-start justify-between gap-x-10 gap-y-2">
         {onHeld && plan.zones.length > 0 && (
-          <HoldLine ground={ground} held={held} onBack={() => onHeld({})} />
+          <HoldLine ground={ground} plan={plan} held={held} onBack={() => onHeld({})} />
         )}
         {actions}
       </div>
@@ -99,12 +99,18 @@ export function FitView({
   );
 }
 
+interface HoldLineProps {
+  ground: Ground;
+  plan: FitPlan;
+  held: Held;
+  onBack: () => void;
+}
+
 /** What is held, and the one click that lets go of it all; beforehand, that sizes can be taken hold of. */
-function HoldLine({ ground: { context }, held, onBack }: { ground: Ground; held: Held; onBack: () => void }) {
-  const words = Object.entries(held).map(
-    ([zone, position]) =>
-      `${sayZone(zone as keyof Held, context.chestWord)} at ${context.sizes[position] ?? ''}`,
-  );
+function HoldLine({ ground, plan, held, onBack }: HoldLineProps) {
+  const words = plan.zones
+    .filter(({ zone }) => held[zone] !== undefined)
+    .map(({ zone, size }) => `${sayZone(zone, ground.context.chestWord)} ${sayInSize(size, 'at')}`);
   return (
     <p className="flex min-h-11 flex-wrap items-center gap-x-5 print:hidden">
       {words.length === 0 ? (

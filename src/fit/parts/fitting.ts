@@ -1,3 +1,4 @@
+import { placesPerSize } from '../../../shared/fit/between-lines.ts';
 import { bodyPositions } from '../../../shared/fit/body-position.ts';
 import type { FitInput, FitPlan } from '../../../shared/fit/fit.schema.ts';
 import type { ZoneId } from '../../../shared/fit/fit-words.ts';
@@ -21,6 +22,8 @@ export interface Ground {
   /** The plan with nothing held. */
   plan: FitPlan;
   context: SayContext;
+  /** Where a size may be put: at the sizes, or half-way between two as well. */
+  perSize: 1 | 2;
   /** Every size's ease at every point, in mm, by position. */
   ladders: ReadonlyMap<PointId, readonly (number | null)[]>;
   /** Where the body stands among the sizes, by point: between two sizes, or beyond the ends. */
@@ -35,6 +38,7 @@ export function groundOf(input: FitInput, speech: Speech, plan: FitPlan = planUn
     input,
     plan,
     context: { ...speech, sizes: input.sizes.map((size) => size.label) },
+    perSize: placesPerSize(input),
     ladders,
     bodyAt: bodyPositions(input),
     domain: easeDomain([...domainValues(plan), ...neighbourEases(plan, ladders)]),
@@ -76,6 +80,6 @@ function easeLadders(input: FitInput, plan: FitPlan): Map<PointId, (number | nul
 function neighbourEases(plan: FitPlan, ladders: Map<PointId, (number | null)[]>): (number | null)[] {
   return plan.points.flatMap(({ point, size }) => {
     const ladder = ladders.get(point) ?? [];
-    return [ladder[size.position - 1] ?? null, ladder[size.position + 1] ?? null];
+    return [ladder[Math.ceil(size.position) - 1] ?? null, ladder[Math.floor(size.position) + 1] ?? null];
   });
 }

@@ -64,7 +64,7 @@ function PathHand(props: RowProps) {
       <SizeNode
         label={`Size at the ${sayZone(row.zone, context.chestWord)}`}
         valueText={sayNode({ ...row, isHeld }, context)}
-        sizeLabel={row.label}
+        sizeLabel={row.size.label}
         position={row.position}
         sizeCount={context.sizes.length}
         geometry={geometry}

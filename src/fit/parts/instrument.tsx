@@ -34,9 +34,10 @@ export function Instrument({ ground, plan, held, onHold, onRelease }: Instrument
   const room = Math.min(sizes.length, roomForSizes(width));
   const layout = useMemo(() => layOut(rows, width, room), [rows, width, room]);
   const window = useSizeWindow(rows, { sizeCount: sizes.length, room, spare: isDragging ? 0 : 1 }, showsAll);
-  const geometry = pathGeometry(window, layout.path.width, layout.path.edge);
+  const geometry = pathGeometry(window, layout.path.width, layout.path.edge, ground.perSize);
   const domain = useWideningDomain(ground, plan, Object.keys(held).length > 0);
-  const used = new Set(rows.map((row) => row.position));
+  // Between two lines both are wanted: one measures from them.
+  const used = new Set(rows.flatMap(({ position }) => [Math.floor(position), Math.ceil(position)]));
   return (
     <div ref={box} className="relative">
       <Fills id={fillId} />

@@ -1,4 +1,4 @@
-import type { FitPlan, PointResult, ZonePlan } from '../../../shared/fit/fit.schema.ts';
+import type { FitPlan, PointResult, SizeChoice, ZonePlan } from '../../../shared/fit/fit.schema.ts';
 import { ZONE_IDS, type ZoneId } from '../../../shared/fit/fit-words.ts';
 import { POINT_IDS, type PointId } from '../../../shared/points/point-ids.ts';
 
@@ -12,7 +12,7 @@ export interface FitRow {
   hasNode: boolean;
   isBranch: boolean;
   position: number;
-  label: string;
+  size: SizeChoice;
   /** The zone that a zone without a measured point takes its size from; null where it has a point. */
   follows: ZoneId | null;
 }
@@ -50,7 +50,7 @@ export function rowsInOrder(
       zone,
       isBranch: isBranchZone(zone),
       position: plan.size.position,
-      label: plan.size.label,
+      size: plan.size,
       follows: null,
     };
     if (own.length === 0) {

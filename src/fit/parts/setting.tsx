@@ -20,6 +20,29 @@ export function Fast({ children }: { children: ReactNode }) {
   return <span className="font-semibold text-ink">{children}</span>;
 }
 
+interface LinesWordProps {
+  isBetween: boolean;
+  onChange: (isBetween: boolean) => void;
+}
+
+/** Whether it is cut along the sizes' own lines, or half-way between two as well. */
+export function LinesWord({ isBetween, onChange }: LinesWordProps) {
+  return (
+    <>
+      cut{' '}
+      <SentenceSelect
+        label="Cutting lines"
+        value={isBetween ? 'between' : 'along'}
+        options={[
+          { value: 'along', label: 'along the lines' },
+          { value: 'between', label: 'also between them', inList: 'also between them, by half sizes' },
+        ]}
+        onChange={(value) => onChange(value === 'between')}
+      />
+    </>
+  );
+}
+
 interface SilhouetteWordProps {
   value: Silhouette;
   /** The pattern's own, said in the list. */

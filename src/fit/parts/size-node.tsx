@@ -78,27 +78,28 @@ function Mark({ isHandle, isHeld, sizeLabel }: SizeNodeProps) {
   );
 }
 
-function moveByKey(event: KeyboardEvent, { position, sizeCount, onMove, onRelease }: SizeNodeProps) {
+function moveByKey(event: KeyboardEvent, props: SizeNodeProps) {
+  const { geometry, position, sizeCount, onMove, onRelease } = props;
   if (event.key === 'Delete' || event.key === 'Backspace') {
     event.preventDefault();
     onRelease();
     return;
   }
-  const next = keyTarget(event.key, position, sizeCount - 1);
+  const next = keyTarget(event.key, position, sizeCount - 1, geometry.stop);
   if (next === null) return;
   event.preventDefault();
   const target = Math.max(0, Math.min(sizeCount - 1, next));
   if (target !== position) onMove(target);
 }
 
-function keyTarget(key: string, position: number, last: number): number | null {
+function keyTarget(key: string, position: number, last: number, stop: number): number | null {
   switch (key) {
     case 'ArrowRight':
     case 'ArrowUp':
-      return position + 1;
+      return position + stop;
     case 'ArrowLeft':
     case 'ArrowDown':
-      return position - 1;
+      return position - stop;
     case 'PageUp':
       return position + 3;
     case 'PageDown':

@@ -36,6 +36,21 @@ export function SizePath({ rows, layout, geometry, ground }: SizePathProps) {
             stroke="var(--rule)"
           />
         ))}
+      {geometry.stop < 1 &&
+        geometry.column >= 16 &&
+        sizes
+          .slice(1)
+          .map((position) => (
+            <line
+              key={position}
+              x1={geometry.toX(position - 0.5)}
+              x2={geometry.toX(position - 0.5)}
+              y1={2}
+              y2={layout.height}
+              stroke="var(--rule)"
+              strokeDasharray="2 6"
+            />
+          ))}
       <g stroke="var(--woad)">
         <path d={lines.neck} strokeWidth="2" strokeDasharray="2 4" />
         <path d={lines.sleeve} strokeWidth="2" strokeDasharray="2 4" />

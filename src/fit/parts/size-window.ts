@@ -46,22 +46,30 @@ const EDGE_PX = 8;
 export interface PathGeometry {
   width: number;
   column: number;
+  /** How far it is from one place for a size to the next: a whole size, or half of one. */
+  stop: number;
   window: SizeWindow;
   /** The x of a size's line. */
   toX: (position: number) => number;
   /** As `toX`, kept inside the drawing: `isBeyond` where the place itself lies outside it. */
   toXWithin: (position: number) => { x: number; isBeyond: -1 | 0 | 1 };
-  /** The nearest size to an x, in the window. */
+  /** The nearest place to an x, in the window. */
   toPosition: (x: number) => number;
 }
 
 /** Lays a window's sizes out over `width`, with room at both edges for a body beyond the first or last size. */
-export function pathGeometry(window: SizeWindow, width: number, edge: number): PathGeometry {
+export function pathGeometry(
+  window: SizeWindow,
+  width: number,
+  edge: number,
+  perSize: 1 | 2 = 1,
+): PathGeometry {
   const column = (width - 2 * edge) / window.count;
   const toX = (position: number) => edge + (position - window.start + 0.5) * column;
   return {
     width,
     column,
+    stop: 1 / perSize,
     window,
     toX,
     toXWithin: (position) => {
@@ -72,7 +80,7 @@ export function pathGeometry(window: SizeWindow, width: number, edge: number): P
     },
     toPosition: (x) =>
       within(
-        Math.round((x - edge) / column - 0.5) + window.start,
+        Math.round(((x - edge) / column - 0.5) * perSize) / perSize + window.start,
         window.start,
         window.start + window.count - 1,
       ),

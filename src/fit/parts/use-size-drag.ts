@@ -1,7 +1,7 @@
 import { useEffect, useRef, type PointerEvent } from 'react';
 import type { PathGeometry } from './size-window.ts';
 
-/** How often a node held at the edge goes on by one size, in ms. */
+/** How often a node held at the edge goes on by one stop, in ms. */
 const EDGE_STEP_MS = 220;
 /** How far, in px, a pointer moves before it counts as dragging rather than as a click. */
 const SLACK_PX = 4;
@@ -78,9 +78,9 @@ function useEdgeSteps(latest: { current: SizeDrag }) {
   useEffect(() => stop, []);
   const start = (direction: -1 | 1) => {
     timer.current ??= setInterval(() => {
-      const { position, sizeCount, onMove } = latest.current;
-      const next = position + direction;
-      if (next >= 0 && next < sizeCount) onMove(next);
+      const { geometry, position, sizeCount, onMove } = latest.current;
+      const next = position + direction * geometry.stop;
+      if (next >= 0 && next <= sizeCount - 1) onMove(next);
     }, EDGE_STEP_MS);
   };
   return { start, stop };

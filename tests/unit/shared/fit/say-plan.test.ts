@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import type { Caution, FitPlan, ZonePlan } from '../../../../shared/fit/fit.schema.ts';
+import type { Caution, FitPlan, SizeChoice, ZonePlan } from '../../../../shared/fit/fit.schema.ts';
 import type { ZoneId } from '../../../../shared/fit/fit-words.ts';
 import { sayNode, sayPlan, sayZones } from '../../../../shared/fit/say-plan.ts';
 import type { SayContext } from '../../../../shared/fit/say-words.ts';
@@ -7,10 +7,17 @@ import type { SayContext } from '../../../../shared/fit/say-words.ts';
 const SIZES = ['6', '8', '10', '12', '14', '16', '18', '20', '22'];
 const context: SayContext = { unit: 'cm', chestWord: 'bust', sizes: SIZES };
 
+/** A size by its label; `16–18` lies half-way between two. */
+function size(label: string, labels: readonly string[] = SIZES): SizeChoice {
+  const [smaller = '', larger] = label.split('–');
+  if (larger === undefined) return { label, position: labels.indexOf(label) };
+  return { label, position: labels.indexOf(smaller) + 0.5, between: { smaller, larger } };
+}
+
 function zones(sizes: Partial<Record<ZoneId, string>>, labels: readonly string[] = SIZES): ZonePlan[] {
   return Object.entries(sizes).map(([zone, label]) => ({
     zone: zone as ZoneId,
-    size: { label, position: labels.indexOf(label) },
+    size: size(label, labels),
     governedBy: null,
   }));
 }
@@ -40,6 +47,24 @@ describe('sayPlan', () => {
   it('runs out where the garment gets larger downwards', () => {
     expect(sayPlan(plan({ shoulder: '16', bust: '16', waist: '18', hip: '18', hem: '18' }), context)).toBe(
       'Cut 16 to the bust, then run out to 18 from the waist down.',
+    );
+  });
+
+  it('says in words where the line lies halfway between two sizes: throughout, first, in the middle, last, apart', () => {
+    expect(sayPlan(plan({ shoulder: '16–18', bust: '16–18', hip: '16–18' }), context)).toBe(
+      'Cut halfway between 16 and 18 throughout.',
+    );
+    expect(sayPlan(plan({ shoulder: '14–16', bust: '14–16', waist: '16', hip: '16' }), context)).toBe(
+      'Cut halfway between 14 and 16 to the bust, then run out to 16 from the waist down.',
+    );
+    expect(sayPlan(plan({ bust: '14', waist: '14–16', hip: '16', hem: '16' }), context)).toBe(
+      'Cut 14 at the bust, then run out to halfway between 14 and 16 at the waist and 16 from the hip down.',
+    );
+    expect(sayPlan(plan({ bust: '18', waist: '18', hip: '16–18', hem: '16–18' }), context)).toBe(
+      'Cut 18 to the waist, then come in to halfway between 16 and 18 from the hip down.',
+    );
+    expect(sayPlan(plan({ neck: '16–18', shoulder: '16', sleeve: '18', bust: '16' }), context)).toBe(
+      'Cut 16, with the sleeve in 18 and the neck halfway between 16 and 18.',
     );
   });
 
@@ -207,19 +232,28 @@ describe('sayNode', () => {
   const drafted = { easeMm: 60, leewayMm: 20, verdict: 'asDrafted' as const };
 
   it('reads as one breath', () => {
-    expect(sayNode({ label: '16', zone: 'hip', result: drafted, isHeld: false }, context)).toBe(
+    expect(sayNode({ size: size('16'), zone: 'hip', result: drafted, isHeld: false }, context)).toBe(
       '16, hip: ease 6.0 cm, as drafted',
     );
     expect(
-      sayNode({ label: 'M', zone: 'bust', result: { ...drafted, easeMm: null }, isHeld: false }, context),
+      sayNode(
+        { size: size('M'), zone: 'bust', result: { ...drafted, easeMm: null }, isHeld: false },
+        context,
+      ),
     ).toBe('M, bust: ease not published, as drafted');
-    expect(sayNode({ label: 'M', zone: 'hem', result: null, isHeld: false }, context)).toBe(
+    expect(sayNode({ size: size('M'), zone: 'hem', result: null, isHeld: false }, context)).toBe(
       'M, hem: nothing to compare',
     );
   });
 
+  it('says a place between two sizes in words', () => {
+    expect(sayNode({ size: size('16–18'), zone: 'hip', result: drafted, isHeld: false }, context)).toBe(
+      'halfway between 16 and 18, hip: ease 6.0 cm, as drafted',
+    );
+  });
+
   it('says that it is held', () => {
-    expect(sayNode({ label: '16', zone: 'hip', result: drafted, isHeld: true }, context)).toMatch(
+    expect(sayNode({ size: size('16'), zone: 'hip', result: drafted, isHeld: true }, context)).toMatch(
       /as drafted, held$/,
     );
   });

@@ -58,6 +58,16 @@ describe('pathGeometry', () => {
     expect(geometry.toPosition(999)).toBe(8);
   });
 
+  it('stops half-way between two sizes as well where it is cut there', () => {
+    const halves = pathGeometry({ start: 4, count: 5 }, 220, 10, 2);
+    expect([geometry.stop, halves.stop]).toEqual([1, 0.5]);
+    expect(halves.toPosition(30)).toBe(4);
+    expect(halves.toPosition(48)).toBe(4.5);
+    expect(halves.toPosition(62)).toBe(5);
+    expect(halves.toPosition(-100)).toBe(4);
+    expect(halves.toPosition(999)).toBe(8);
+  });
+
   it('says on which side a place lies outside the drawing', () => {
     expect(geometry.toXWithin(2)).toEqual({ x: 8, isBeyond: -1 });
     expect(geometry.toXWithin(12)).toEqual({ x: 212, isBeyond: 1 });
