@@ -22,7 +22,7 @@ export default async function setup(project: TestProject): Promise<() => Promise
 }
 
 /** A server whose data are removed when it stops; what a killed run left behind is removed first. */
-async function startThrowawayServer(): Promise<{ url: string; stop: () => Promise<void> }> {
+export async function startThrowawayServer(): Promise<{ url: string; stop: () => Promise<void> }> {
   mkdirSync(HOME, { recursive: true });
   for (const name of readdirSync(HOME).filter((entry) => entry.startsWith('mariadb-'))) {
     // One made a moment ago may belong to a run that is about to lock it.
