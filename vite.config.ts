@@ -19,7 +19,15 @@ export default defineConfig({
     // Of two cores it would use one; the tests often wait for a database or a browser.
     maxWorkers: 2,
     projects: [
-      { extends: true, test: { name: 'unit', include: ['tests/unit/**/*.test.{ts,tsx}'], setupFiles } },
+      {
+        extends: true,
+        test: {
+          name: 'unit',
+          include: ['tests/unit/**/*.test.{ts,tsx}'],
+          setupFiles,
+          testTimeout: MINUTE / 2,
+        },
+      },
       {
         extends: true,
         test: {

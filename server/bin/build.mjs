@@ -81,8 +81,10 @@ async function build(root) {
   rmSync(join(root, 'dist/stamp'), { force: true });
   keepEarlierAssets(join(root, 'dist/client/assets'), join(draft, 'client/assets'));
   for (const part of ['client', 'server']) {
-    rmSync(join(root, 'dist', part), { recursive: true, force: true });
-    renameSync(join(draft, part), join(root, 'dist', part));
+    // Renamed away before it is removed, which takes longer: hardly a moment is without it.
+    const [current, old] = [join(root, 'dist', part), join(draft, `old-${part}`)];
+    if (existsSync(current)) renameSync(current, old);
+    renameSync(join(draft, part), current);
   }
   rmSync(draft, { recursive: true, force: true });
 }

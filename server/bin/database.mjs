@@ -78,10 +78,17 @@ function finish({ child, ended }, { folder, port, password, isThrowaway }) {
   };
 }
 
+/** A server that starts removes the temporary tables it finds, in the system's folder also those of others. */
+const temporaryFolder = (folder) => join(folder, 'database.tmp');
+
 /** Makes the data folder where there is none; says which user the server runs as (undefined: this one). */
 async function prepareData({ install }, folder, data) {
   mkdirSync(folder, { recursive: true, mode: 0o711 });
   const as = process.getuid() === 0 ? await unprivilegedOwner(folder, data) : undefined;
+  const temporary = temporaryFolder(folder);
+  rmSync(temporary, { recursive: true, force: true });
+  mkdirSync(temporary, { mode: 0o700 });
+  if (as) chownSync(temporary, as.uid, as.gid);
   if (existsSync(data)) return as;
   // Made beside and renamed: one killed half-way is begun again.
   const draft = `${data}.new`;
@@ -89,7 +96,7 @@ async function prepareData({ install }, folder, data) {
   mkdirSync(draft, { mode: 0o700 });
   if (as) chownSync(draft, as.uid, as.gid);
   const user = as ? as.name : process.getuid() === 0 ? 'root' : null;
-  const { code, output } = await runTied(install, [
+  const options = [
     '--no-defaults',
     ...(user
       ? [`--user=${user}`, '--auth-root-socket-user=root']
@@ -97,7 +104,8 @@ async function prepareData({ install }, folder, data) {
     `--datadir=${draft}`,
     '--skip-test-db',
     '--skip-name-resolve',
-  ]);
+  ];
+  const { code, output } = await runTied(install, options, { env: { ...process.env, TMPDIR: temporary } });
   if (code !== 0) throw new Sentence(`The database could not be made:\n${lastLines(output)}`);
   renameSync(draft, data);
   return as;
@@ -156,6 +164,7 @@ async function launch({ server }, { folder, data, port, as, password, isThrowawa
       `--port=${port}`,
       '--bind-address=127.0.0.1',
       `--init-file=${initPath}`,
+      `--tmpdir=${temporaryFolder(folder)}`,
       '--skip-name-resolve',
       '--skip-log-bin',
       '--local-infile=0',

@@ -2,6 +2,7 @@
 import { statSync } from 'node:fs';
 import { createServer } from 'node:net';
 import { setTimeout as wait } from 'node:timers/promises';
+import { step } from './steps.mjs';
 
 /**
  * Takes the lock on a folder, or answers null where another process holds it. The name is the folder's own
@@ -21,14 +22,20 @@ export function lockFolder(folder, purpose) {
 
 /** Holds the lock on a folder while the work is done, waiting for whoever has it. */
 export async function whileLocked(folder, purpose, work) {
-  let lock = await lockFolder(folder, purpose);
-  while (lock === null) {
-    await wait(100);
-    lock = await lockFolder(folder, purpose);
-  }
+  const lock =
+    (await lockFolder(folder, purpose)) ??
+    (await step('Waiting for another start in this folder', () => waitForLock(folder, purpose)));
   try {
     return await work();
   } finally {
     await lock.release();
+  }
+}
+
+async function waitForLock(folder, purpose) {
+  for (;;) {
+    await wait(100);
+    const lock = await lockFolder(folder, purpose);
+    if (lock !== null) return lock;
   }
 }

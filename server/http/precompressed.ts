@@ -21,18 +21,17 @@ export function precompressed(folder: string, maxAge: string): RequestHandler[] 
           names.has(request.path + suffix) && request.acceptsEncodings(encoding) === encoding,
       );
       response.vary('accept-encoding');
-      if (found) {
-        const [encoding, suffix] = found;
-        response.set('content-encoding', encoding);
-        request.url = request.path + suffix;
-      }
+      if (found) request.url = request.path + found[1];
       next();
     },
     express.static(folder, { immutable: true, maxAge, index: false, redirect: false, setHeaders: setType }),
   ];
 }
 
+/** Only once the file is really being sent: an answer that it is gone is not compressed. */
 function setType(response: Response, path: string): void {
-  const suffix = extname(path);
-  if (suffix === '.br' || suffix === '.gz') response.type(extname(path.slice(0, -suffix.length)));
+  const found = ENCODINGS.find(([, suffix]) => path.endsWith(suffix));
+  if (!found) return;
+  const [encoding, suffix] = found;
+  response.set('content-encoding', encoding).type(extname(path.slice(0, -suffix.length)));
 }

@@ -45,6 +45,16 @@ describe('the built client', () => {
     expect(answer.headers['content-encoding']).toBeUndefined();
   });
 
+  it('answers plainly that a file is gone, also where its compressed form was there at the start', async () => {
+    writeFileSync(join(folder, 'assets/gone.js.gz'), gzipSync(SCRIPT));
+    const late = (await testApp({ client: { folder } })).anonymous();
+    rmSync(join(folder, 'assets/gone.js.gz'));
+    const answer = await late.get('/assets/gone.js').set('accept-encoding', 'gzip');
+    expect(answer.status).toBe(404);
+    expect(answer.headers['content-encoding']).toBeUndefined();
+    expect(answer.text).toBe('There is no such file.');
+  });
+
   it('does not leave its folder', async () => {
     expect((await agent.get('/assets/..%2fsecret.txt')).status).toBe(404);
     expect((await agent.get('/assets/%2e%2e/%2e%2e/package.json')).status).toBe(404);

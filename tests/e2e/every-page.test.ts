@@ -24,14 +24,18 @@ describe('every page', () => {
     async (name) => {
       const drawn = pages.find((page) => page.name === name);
       if (!drawn) throw new Error(`${name} was not found`);
+      const page = await visit.open(drawn.path, drawn.isPublic ? {} : { as: 'member' });
+      await page.locator('h1').waitFor();
+      await page.waitForLoadState('networkidle');
+      expect(await page.title()).toMatch(/Leeway/);
+      expect(await page.locator('main').count()).toBe(1);
       for (const viewport of [DESK, PHONE]) {
-        const page = await visit.open(drawn.path, { viewport, ...(drawn.isPublic ? {} : { as: 'member' }) });
-        await page.locator('h1').waitFor();
-        await page.waitForLoadState('networkidle');
-        expect(await page.title()).toMatch(/Leeway/);
-        expect(await page.locator('main').count()).toBe(1);
-        const overflow = await page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth);
-        expect(overflow, `${name} at ${String(viewport.width)} px`).toBeLessThanOrEqual(0);
+        await page.setViewportSize(viewport);
+        const overflow = () => page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth);
+        // What is drawn to the window's width is drawn anew a moment after it changed.
+        await expect
+          .poll(overflow, { message: `${name} at ${String(viewport.width)} px`, timeout: 10_000 })
+          .toBeLessThanOrEqual(0);
         await expectAccessible(page);
       }
     },

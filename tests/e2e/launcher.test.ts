@@ -76,6 +76,7 @@ describe('npm start', () => {
       expect([name, modeOf(name)]).toEqual([name, '600']);
     }
     expect(modeOf('database')).toBe('700');
+    expect(modeOf('database.tmp')).toBe('700');
   });
 
   it('refuses a second instance on the same data at once, in one sentence', async () => {

@@ -14,6 +14,7 @@ export async function expectAccessible(page: Page): Promise<void> {
   if (viewport) await page.setViewportSize({ ...viewport, height: Math.max(viewport.height, height) });
   for (const colorScheme of ['light', 'dark'] as const) {
     await page.emulateMedia({ colorScheme });
+    await page.evaluate(untilDrawn);
     const axe = new AxeBuilder({ page });
     const { violations } = await (
       colorScheme === 'light' ? axe.withTags(RULES) : axe.withRules(OF_COLOUR)
@@ -26,4 +27,18 @@ export async function expectAccessible(page: Page): Promise<void> {
     expect(found, `${page.url()} in ${colorScheme}`).toEqual([]);
   }
   if (viewport) await page.setViewportSize(viewport);
+}
+
+/** In the page: until it is drawn in the new scheme and no colour is on its way from one to the other. */
+async function untilDrawn(): Promise<void> {
+  const nextFrame = () =>
+    new Promise((resolve) => {
+      requestAnimationFrame(resolve);
+    });
+  await nextFrame();
+  await nextFrame();
+  const passing = document
+    .getAnimations()
+    .filter((animation) => animation.effect?.getComputedTiming().endTime !== Infinity);
+  await Promise.allSettled(passing.map((animation) => animation.finished));
 }

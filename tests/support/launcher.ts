@@ -1,5 +1,5 @@
 import type { ChildProcess } from 'node:child_process';
-import { mkdirSync, mkdtempSync, readdirSync, readFileSync, rmSync, statSync } from 'node:fs';
+import { chmodSync, mkdirSync, mkdtempSync, readdirSync, readFileSync, rmSync, statSync } from 'node:fs';
 import { createServer } from 'node:net';
 import { join } from 'node:path';
 import { setTimeout as wait } from 'node:timers/promises';
@@ -90,6 +90,8 @@ export function temporaryFolder(): { path: string; remove: () => void } {
     if (Date.now() - statSync(path).mtimeMs > HOUR_MS) rmSync(path, { recursive: true, force: true });
   }
   const path = mkdtempSync(join(home, 'data-'));
+  // As a person's own would be: the database's user passes through.
+  chmodSync(path, 0o711);
   return { path, remove: () => rmSync(path, { recursive: true, force: true }) };
 }
 
