@@ -25,7 +25,10 @@ describe('every page', () => {
       const drawn = pages.find((page) => page.name === name);
       if (!drawn) throw new Error(`${name} was not found`);
       for (const viewport of [DESK, PHONE]) {
-        const page = await visit.open(drawn.path, { viewport, ...(drawn.isPublic ? {} : { as: 'member' }) });
+        const page = await visit.open(drawn.path, {
+          viewport,
+          ...(drawn.as === null ? {} : { as: drawn.as }),
+        });
         await page.locator('h1').waitFor();
         await page.waitForLoadState('networkidle');
         expect(await page.title()).toMatch(/Leeway/);
