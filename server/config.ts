@@ -23,6 +23,8 @@ export interface Config {
   trustProxy: number | string[];
   /** Invented people and patterns with their own accounts: only where nobody else can reach them. */
   isDemo: boolean;
+  /** Mail is received here and shown on a page: only where nobody else can reach it and no mail server is named. */
+  hasMailbox: boolean;
 }
 
 /** A value in the environment that cannot be used; the message is one sentence that names the variable. */
@@ -96,6 +98,7 @@ export function readConfig(environment: NodeJS.ProcessEnv, databaseUrl?: string)
   if (database === undefined) throw new ConfigError('DATABASE_URL is missing.');
   const dataFolder = resolve(rest.LEEWAY_DATA);
   const appUrl = new URL(rest.APP_URL ?? `http://${urlHost(host)}:${port}`).origin;
+  const isPrivate = isLoopback(host) && rest.DATABASE_URL === undefined;
   return {
     port,
     host,
@@ -108,13 +111,16 @@ export function readConfig(environment: NodeJS.ProcessEnv, databaseUrl?: string)
     smtpUrl: rest.SMTP_URL ?? null,
     mailFrom: rest.MAIL_FROM ?? `Leeway <leeway@${new URL(appUrl).hostname}>`,
     trustProxy: /^\d+$/.test(proxies) ? Number(proxies) : proxies.split(',').map((part) => part.trim()),
-    isDemo: isLoopback(host) && rest.DATABASE_URL === undefined,
+    isDemo: isPrivate,
+    // A proxy in front, or an address that others type, would show everybody's mail to everybody.
+    hasMailbox:
+      isPrivate && rest.SMTP_URL === undefined && proxies === '0' && isLoopback(new URL(appUrl).hostname),
   };
 }
 
 /** Whether only this machine can reach what listens on `host`. */
 export function isLoopback(host: string): boolean {
-  return host === 'localhost' || host === '::1' || /^127(\.\d{1,3}){3}$/.test(host);
+  return host === 'localhost' || host === '::1' || host === '[::1]' || /^127(\.\d{1,3}){3}$/.test(host);
 }
 
 function sayIssue(issue: z.core.$ZodIssue): string {

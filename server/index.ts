@@ -1,7 +1,7 @@
 import { createServer, type RequestListener, type Server } from 'node:http';
 import { join } from 'node:path';
 import type { RequestHandler } from 'express';
-import { pino } from 'pino';
+import { pino, type Logger } from 'pino';
 import { createApp } from './app.ts';
 import { createAuth } from './auth.ts';
 import { ConfigError, type Config } from './config.ts';
@@ -11,29 +11,34 @@ import { isDemoAccountKnown } from './demo/demo-accounts.ts';
 import { keptSignIns, type DemoSignIn } from './demo/kept-sign-ins.ts';
 import { seedDemo, type SeedDeps } from './demo/seed.ts';
 import { createFileStore } from './files/file-store.ts';
+import { finisher } from './http/finish.ts';
+import { startMail } from './start-mail.ts';
 
 export { ConfigError, readConfig } from './config.ts';
 
-const FINISH_MS = 8_000;
+const PATIENCE_MS = 15_000;
 
 interface ServeOptions {
   /** The project's folder. */
   root: string;
   /** Vite in the same process instead of the built client. */
   isDevelopment: boolean;
+  /** How long a request may still take once the server was told to end. */
+  patienceMs?: number;
+  log?: Logger;
 }
 
 export interface Served {
   url: string;
   /** The demo's accounts; none where other people can reach this instance. */
   signIns: DemoSignIn[];
-  /** Finishes the requests under way, then closes the database's connections. */
+  /** Finishes the requests and the mail under way, then closes the database's connections. */
   stop: () => Promise<void>;
 }
 
 /** Migrates and listens; whoever calls it has parsed the configuration. Throws `ConfigError`. */
-export async function serve(config: Config, { root, isDevelopment }: ServeOptions): Promise<Served> {
-  const log = pino({ base: null });
+export async function serve(config: Config, options: ServeOptions): Promise<Served> {
+  const { root, isDevelopment, patienceMs = PATIENCE_MS, log = pino({ base: null }) } = options;
   const database = createDatabase(config.databaseUrl);
   try {
     await migrate(database);
@@ -42,16 +47,19 @@ export async function serve(config: Config, { root, isDevelopment }: ServeOption
     const signIns = config.isDemo ? await demoSignIns(config, { db, auth, log }) : [];
     let app: RequestListener | null = null;
     const server = createServer((request, response) => app?.(request, response));
+    const finish = finisher(server, patienceMs);
     const development = isDevelopment ? await startVite(root, server) : null;
     const client = development ?? { folder: join(root, 'dist/client') };
-    app = createApp({ db, auth, log, config, client });
+    app = createApp({ db, auth, log, config, client, poolUse: database.poolUse });
     await listen(server, config);
+    const mail = await startMail(config, { db, log });
     return {
       url: config.appUrl,
       signIns,
       async stop() {
         await development?.close();
-        await finish(server);
+        await finish();
+        await mail.stop();
         await database.close();
       },
     };
@@ -84,18 +92,6 @@ function sayListenError(error: NodeJS.ErrnoException, host: string, port: number
   if (error.code === 'EACCES')
     return `PORT ${port} may not be used by this user: set PORT to one above 1023.`;
   return `HOST ${host} cannot be listened on (${error.code ?? error.message}).`;
-}
-
-/** Takes no new requests; those that hang are cut off after a while. */
-function finish(server: Server): Promise<void> {
-  return new Promise((resolve) => {
-    const late = setTimeout(() => server.closeAllConnections(), FINISH_MS);
-    server.close(() => {
-      clearTimeout(late);
-      resolve();
-    });
-    server.closeIdleConnections();
-  });
 }
 
 async function startVite(root: string, server: Server) {

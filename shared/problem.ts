@@ -10,6 +10,7 @@ export const PROBLEMS = {
   signedOut: { status: 401, title: 'Sign in first' },
   foreignOrigin: { status: 403, title: 'The request came from another site' },
   forbidden: { status: 403, title: 'This needs another role' },
+  outsideScope: { status: 403, title: 'This token is not allowed to do that' },
   notFound: { status: 404, title: 'There is nothing here' },
   conflict: { status: 409, title: 'This cannot be done as things stand' },
   tooLarge: { status: 413, title: 'This is larger than allowed' },
@@ -27,9 +28,9 @@ export const fieldProblemSchema = z.object({ pointer: z.string(), detail: z.stri
 
 /**
  * The body of every `application/problem+json` answer. Written with zod's small form, since every page may have to
- * read one and the front page is to stay light.
+ * read one and the front page is to stay light. Members it does not name stay: a page that knows them parses them.
  */
-export const problemSchema = z.object({
+export const problemSchema = z.looseObject({
   type: z.string(),
   title: z.string(),
   status: z.int(),

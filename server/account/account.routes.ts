@@ -1,64 +1,66 @@
-import { fromNodeHeaders } from 'better-auth/node';
-import express, { Router, type Request, type Response as Reply } from 'express';
-import { z } from 'zod';
-import { signInSchema, signUpSchema } from '../../shared/account.ts';
+import express, { Router } from 'express';
+import { accountChangeSchema, passwordAgainSchema } from '../../shared/account.ts';
+import { accountSchema, type Account } from '../../shared/account-answers.ts';
 import { meSchema } from '../../shared/me.ts';
-import { ADDRESS_HEADER, type Auth } from '../auth.ts';
+import { findTeacherRequest } from '../admin/teacher-requests.store.ts';
+import { removeBytes } from '../files/remove-bytes.ts';
+import type { FileStore } from '../files/file-store.ts';
 import { answer } from '../http/answer.ts';
-import type { RouteDeps } from '../http/deps.ts';
-import { parseBody } from '../http/parse.ts';
-import { fromAuth } from './auth-problem.ts';
+import { parseBody, parsePatch } from '../http/parse.ts';
+import { found } from '../http/problem.ts';
+import { findAccount, renameAccount } from './account.store.ts';
+import { ask, setCookies } from './ask.ts';
+import type { AuthRouteDeps } from './auth-deps.ts';
+import { deleteAccount } from './deletion.store.ts';
+import { demandPassword } from './password-of.ts';
 
-const nothingSchema = z.object({}).default({});
-const refusalSchema = z.object({ code: z.string().optional() });
+const THING = 'account';
 
-/**
- * The sign-in library answers under /api/auth, through three addresses only: what is sent is parsed with the
- * form's own schema, and what it refuses is told in the same form as every other refusal.
- */
-export function accountRoutes({ auth, currentUser }: RouteDeps & { auth: Auth }): Router {
+/** Somebody's own account: what it is, and its end. */
+export function accountRoutes(deps: AuthRouteDeps & { files: FileStore }): Router {
+  const { db, auth, files, limits, log, requireUser } = deps;
   const router = Router();
   const sent = express.json({ limit: '16kb' });
-  router.post('/api/auth/sign-up/email', sent, async (request, reply) => {
-    await ask(auth, request, reply, parseBody(signUpSchema, request));
-  });
-  router.post('/api/auth/sign-in/email', sent, async (request, reply) => {
-    await ask(auth, request, reply, parseBody(signInSchema, request));
-  });
-  router.post('/api/auth/sign-out', sent, async (request, reply) => {
-    await ask(auth, request, reply, nothingSchema.parse(request.body));
-  });
-  router.get('/api/auth/get-session', async (request, reply) => {
-    await ask(auth, request, reply);
-  });
+
   router.get('/api/me', async (request, reply) => {
-    reply.json(answer(meSchema, { user: await currentUser(request) }));
+    reply.json(answer(meSchema, { user: await deps.currentUser(request) }));
   });
-  return router;
-}
 
-async function ask(auth: Auth, request: Request, reply: Reply, body?: object): Promise<void> {
-  const headers = fromNodeHeaders(request.headers);
-  for (const name of ['content-length', 'transfer-encoding', 'content-encoding']) headers.delete(name);
-  headers.set(ADDRESS_HEADER, request.ip ?? '');
-  const options = body === undefined ? {} : { body: JSON.stringify(body) };
-  if (body !== undefined) headers.set('content-type', 'application/json');
-  const url = new URL(request.originalUrl, auth.options.baseURL);
-  const response = await auth.handler(
-    new globalThis.Request(url, { method: request.method, headers, ...options }),
-  );
-  const text = await response.text();
-  const retryAfter = response.headers.get('x-retry-after');
-  if (retryAfter !== null) reply.set('retry-after', retryAfter);
-  if (!response.ok) throw fromAuth(response.status, codeOf(text), retryAfter);
-  for (const cookie of response.headers.getSetCookie()) reply.append('set-cookie', cookie);
-  reply.status(response.status).type('application/json').send(text);
-}
+  router.get('/api/account', async (request, reply) => {
+    const user = await requireUser(request);
+    reply.json(answer(accountSchema, await read(user.id)));
+  });
 
-function codeOf(text: string): string | undefined {
-  try {
-    return refusalSchema.parse(JSON.parse(text)).code;
-  } catch {
-    return undefined;
+  router.patch('/api/account', sent, async (request, reply) => {
+    const user = await requireUser(request);
+    const { name } = parsePatch(accountChangeSchema, request);
+    if (name !== undefined) await renameAccount(db, user.id, name);
+    reply.json(answer(accountSchema, await read(user.id)));
+  });
+
+  router.delete('/api/account', sent, async (request, reply) => {
+    const user = await requireUser(request);
+    const { password } = parseBody(passwordAgainSchema, request);
+    await limits.passwordAgain(request, user.id, () => demandPassword(auth, user.id, password));
+    const left = await deleteAccount(db, user.id);
+    await removeBytes(files, log, left);
+    setCookies(reply, await ask(auth, request, { method: 'POST', path: '/sign-out', body: {} }));
+    reply.status(204).end();
+  });
+
+  async function read(userId: string): Promise<Account> {
+    const account = found(await findAccount(db, userId), THING);
+    return {
+      ...account,
+      recoveryCodesLeft: account.twoFactorEnabled ? await codesLeft(userId) : null,
+      teacherRequest: await findTeacherRequest(db, userId),
+    };
   }
+
+  /** The codes are encrypted; only the library can count them. */
+  async function codesLeft(userId: string): Promise<number> {
+    const { backupCodes } = await auth.api.viewBackupCodes({ body: { userId } });
+    return backupCodes.length;
+  }
+  return router;
 }

@@ -13,6 +13,7 @@ export const user = mysqlTable('user', {
   createdAt: moment('created_at').notNull(),
   updatedAt: moment('updated_at').notNull(),
   role: mysqlEnum(ROLES).notNull().default('member'),
+  twoFactorEnabled: boolean('two_factor_enabled').default(false),
 });
 
 export const session = mysqlTable(
@@ -67,9 +68,47 @@ export const verification = mysqlTable(
   (table) => [index('verification_identifier').on(table.identifier)],
 );
 
-export const rateLimit = mysqlTable('rate_limit', {
-  id: uuid().primaryKey(),
-  key: exactText({ length: 512 }).notNull().unique(),
-  count: int().notNull(),
-  lastRequest: bigint('last_request', { mode: 'number' }).notNull(),
-});
+export const rateLimit = mysqlTable(
+  'rate_limit',
+  {
+    id: uuid().primaryKey(),
+    key: exactText({ length: 512 }).notNull().unique(),
+    count: int().notNull(),
+    // When the count began.
+    lastRequest: bigint('last_request', { mode: 'number' }).notNull(),
+  },
+  (table) => [index('rate_limit_last_request').on(table.lastRequest)],
+);
+
+/** A second factor: the authenticator's key and the recovery codes, both encrypted with the instance's secret. */
+export const twoFactor = mysqlTable(
+  'two_factor',
+  {
+    id: uuid().primaryKey(),
+    secret: exactText({ length: 512 }).notNull(),
+    backupCodes: exactText('backup_codes', { length: 4096 }).notNull(),
+    userId: uuid('user_id')
+      .notNull()
+      .references(() => user.id, { onDelete: 'cascade' }),
+    verified: boolean().default(true),
+    failedVerificationCount: int('failed_verification_count').default(0),
+    lockedUntil: moment('locked_until'),
+  },
+  (table) => [index('two_factor_user').on(table.userId)],
+);
+
+/**
+ * What works once and was used: codes of an authenticator within their window, and links that carry their own proof. Kept by
+ * its hash until it would have run out anyway. Ours, not the sign-in library's.
+ */
+export const spentToken = mysqlTable(
+  'spent_token',
+  {
+    hash: exactText({ length: 64 }).primaryKey(),
+    userId: uuid('user_id')
+      .notNull()
+      .references(() => user.id, { onDelete: 'cascade' }),
+    expiresAt: moment('expires_at').notNull(),
+  },
+  (table) => [index('spent_token_user').on(table.userId), index('spent_token_expires').on(table.expiresAt)],
+);

@@ -5,6 +5,7 @@ import { renameSync, rmSync, statSync, unlinkSync, writeFileSync } from 'node:fs
 import { createServer, connect } from 'node:net';
 import { join } from 'node:path';
 import { setTimeout as wait } from 'node:timers/promises';
+import { judgeData, upgradeData, upgradeStatements, writeStamp } from './data-version.mjs';
 import { findProgram, installDebian } from './machine.mjs';
 import { lastLines, Sentence, step } from './steps.mjs';
 import { runTied, spawnTied } from './tied.mjs';
@@ -39,20 +40,37 @@ export async function findMariaDb(say) {
 export async function startDatabase(folder, { isThrowaway = false } = {}) {
   const programs = await findMariaDb();
   const data = join(folder, 'database');
+  const isNew = !existsSync(data);
+  const judged = await judgeData(programs, folder, isNew);
   const as = await step('Preparing the database', () => prepareData(programs, folder, data));
   const password = keptPassword(folder);
+  const { isOlder } = judged;
   for (let attempt = 1; ; attempt += 1) {
     const port = await freePort();
     const server = await step('Starting the database', () =>
-      launch(programs, { folder, data, port, as, password, isThrowaway }),
+      launch(programs, { folder, data, port, as, password, isThrowaway, isOlder }),
     );
-    if (server.isReady) return finish(server, { folder, port, password, isThrowaway });
+    if (server.isReady) {
+      const running = finish(server, { folder, port, password, isThrowaway });
+      if (isOlder) await upgradeOrStop(running, folder, judged);
+      else if (isNew) writeStamp(folder, judged.version);
+      return running;
+    }
     // Another program may have taken the port in the meantime.
     if (attempt < PORT_TRIES && /Address already in use|Can't start server: Bind/.test(server.log()))
       continue;
     throw new Sentence(
       `The database did not start; ${join(folder, 'database.log')} ends:\n${lastLines(server.log())}`,
     );
+  }
+}
+
+async function upgradeOrStop(running, folder, judged) {
+  try {
+    await upgradeData(folder, { ...judged, userName: userName() });
+  } catch (error) {
+    await running.stop();
+    throw error;
   }
 }
 
@@ -149,8 +167,8 @@ function keptPassword(folder) {
   return readFileSync(path, 'utf8').trim();
 }
 
-async function launch({ server }, { folder, data, port, as, password, isThrowaway }) {
-  const initPath = writeInitFile(data, as, password, isThrowaway);
+async function launch({ server }, { folder, data, port, as, password, isThrowaway, isOlder }) {
+  const initPath = writeInitFile(data, as, { password, isThrowaway, isOlder });
   const logPath = join(folder, 'database.log');
   const log = openSync(logPath, 'w', 0o600);
   const child = spawnTied(
@@ -190,7 +208,7 @@ async function launch({ server }, { folder, data, port, as, password, isThrowawa
 }
 
 /** Run by the server before it accepts anybody, so no password-less account is ever open on the network. */
-function writeInitFile(data, as, password, isThrowaway) {
+function writeInitFile(data, as, { password, isThrowaway, isOlder }) {
   const path = join(data, 'init.sql');
   const account = "'leeway'@'127.0.0.1'";
   const statements = [
@@ -198,6 +216,7 @@ function writeInitFile(data, as, password, isThrowaway) {
     `CREATE USER IF NOT EXISTS ${account} IDENTIFIED BY '${password}'`,
     `ALTER USER ${account} IDENTIFIED BY '${password}'`,
     `GRANT ALL PRIVILEGES ON ${isThrowaway ? '*' : 'leeway'}.* TO ${account}`,
+    ...(isOlder ? upgradeStatements(userName()) : []),
   ];
   rmSync(path, { force: true });
   writeFileSync(path, statements.map((statement) => `${statement};\n`).join(''), { flag: 'wx', mode: 0o600 });

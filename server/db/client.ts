@@ -9,7 +9,16 @@ export type Db = MySqlDatabase<MySql2QueryResultHKT, MySql2PreparedQueryHKT, Rec
 export interface Database {
   db: Db;
   pool: Pool;
+  poolUse: () => PoolUse;
   close: () => Promise<void>;
+}
+
+/** How many of the pool's connections work, rest and may be opened, and how many queries wait for one. */
+export interface PoolUse {
+  busy: number;
+  idle: number;
+  waiting: number;
+  limit: number;
 }
 
 /** Connects to MariaDB. Every moment is UTC at both ends: the driver's and the session's. */
@@ -28,6 +37,19 @@ export function createDatabase(url: string, options: { connections?: number } = 
   return {
     db: drizzle({ client: pool }),
     pool,
+    poolUse: () => poolUse(pool),
     close: () => pool.promise().end(),
+  };
+}
+
+/** The driver counts for itself and tells nobody: its own lists are read, in this one place. */
+function poolUse(pool: Pool): PoolUse {
+  const inner = pool as unknown as Record<string, { length?: number; connectionLimit?: number } | undefined>;
+  const idle = inner['_freeConnections']?.length ?? 0;
+  return {
+    busy: (inner['_allConnections']?.length ?? 0) - idle,
+    idle,
+    waiting: inner['_connectionQueue']?.length ?? 0,
+    limit: inner['config']?.connectionLimit ?? 0,
   };
 }

@@ -1,4 +1,4 @@
-import { existsSync } from 'node:fs';
+import { existsSync, readFileSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { sql } from 'drizzle-orm';
 import { drizzle } from 'drizzle-orm/mysql2';
@@ -35,6 +35,14 @@ export async function migrate(database: Database, folder: string = migrationsFol
 
 function isGranted(rows: unknown): boolean {
   return Array.isArray(rows) && (rows[0] as { granted?: unknown } | undefined)?.granted === 1;
+}
+
+/** How many migrations this version brings. */
+export function countKnownMigrations(folder: string = migrationsFolder()): number {
+  const journal = JSON.parse(readFileSync(join(folder, 'meta', '_journal.json'), 'utf8')) as {
+    entries: unknown[];
+  };
+  return journal.entries.length;
 }
 
 /** The nearest `drizzle/` at or above this file: it lies at other depths in the sources and in the build. */

@@ -1,4 +1,5 @@
 import { setTimeout as wait } from 'node:timers/promises';
+import type { MySqlTransactionConfig } from 'drizzle-orm/mysql-core';
 import type { Db } from './client.ts';
 import { ERRNO, errnoOf } from './errors.ts';
 
@@ -9,10 +10,14 @@ const PAUSE_MS = 20;
  * Runs the work in one transaction and begins again where the database chose it as the victim of a deadlock.
  * The work must use the `tx` it is given: anything else runs on another connection, outside the transaction.
  */
-export async function inTransaction<T>(db: Db, work: (tx: Db) => Promise<T>): Promise<T> {
+export async function inTransaction<T>(
+  db: Db,
+  work: (tx: Db) => Promise<T>,
+  config?: MySqlTransactionConfig,
+): Promise<T> {
   for (let attempt = 1; ; attempt += 1) {
     try {
-      return await db.transaction((tx) => work(tx));
+      return await db.transaction((tx) => work(tx), config);
     } catch (error) {
       const errno = errnoOf(error);
       const isVictim = errno === ERRNO.deadlock || errno === ERRNO.changedSinceRead;

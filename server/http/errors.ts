@@ -84,12 +84,22 @@ function describe(error: unknown): Record<string, unknown> {
   const database = describeDatabaseError(error);
   if (!(error instanceof Error)) return { thrown: typeof error };
   const frames = (error.stack ?? '').split('\n').filter((line) => /^\s+at /.test(line));
-  const isQuery = database !== null || error.name === 'DrizzleQueryError';
+  // Whatever went wrong below it, a closed pool or a lost connection too: its message is the query with its values.
+  const isQuery = database !== null || ('query' in error && 'params' in error);
   return {
     error: error.name,
-    ...(isQuery ? { database } : { message: error.message }),
+    ...(isQuery ? { database: database ?? codeBelow(error) } : { message: error.message }),
     at: frames.slice(0, 12).map((line) => line.trim()),
   };
+}
+
+/** What the driver or the network calls it; never a message. */
+function codeBelow(error: Error): { code: string } {
+  for (let at: unknown = error.cause; at instanceof Error; at = at.cause) {
+    if ('code' in at && typeof at.code === 'string' && /^[A-Z_0-9]{1,40}$/.test(at.code))
+      return { code: at.code };
+  }
+  return { code: 'unknown' };
 }
 
 const requestIdOf = (id: unknown): string | undefined => (typeof id === 'string' ? id : undefined);

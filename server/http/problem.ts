@@ -3,6 +3,8 @@ import { PROBLEMS, type FieldProblem, type ProblemBody, type ProblemName } from 
 interface ProblemOptions {
   detail?: string;
   errors?: FieldProblem[];
+  /** Members of this occasion's own (RFC 9457, 3.2), described with the route that answers them. */
+  extension?: Record<string, unknown>;
   cause?: unknown;
 }
 
@@ -12,12 +14,14 @@ export class Problem extends Error {
   readonly problem: ProblemName;
   readonly detail: string | undefined;
   readonly errors: FieldProblem[] | undefined;
+  readonly extension: Record<string, unknown> | undefined;
 
   constructor(problem: ProblemName, options: ProblemOptions = {}) {
     super(options.detail ?? PROBLEMS[problem].title, { cause: options.cause });
     this.problem = problem;
     this.detail = options.detail;
     this.errors = options.errors;
+    this.extension = options.extension;
   }
 
   get status(): number {
@@ -26,6 +30,7 @@ export class Problem extends Error {
 
   toBody(requestId: string | undefined): ProblemBody {
     return {
+      ...this.extension,
       type: `/problems/${this.problem}`,
       title: PROBLEMS[this.problem].title,
       status: this.status,

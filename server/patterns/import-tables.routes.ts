@@ -1,24 +1,20 @@
 import { Router, type Request } from 'express';
-import { z } from 'zod';
-import { TABLE_ROLES } from '../../shared/patterns/imports.schema.ts';
 import type { FileStore } from '../files/file-store.ts';
 import { answer } from '../http/answer.ts';
 import type { RouteDeps } from '../http/deps.ts';
 import { found } from '../http/problem.ts';
 import { commitImport } from './commit-import.ts';
+import { committedSchema, tableRoleSchema } from './imports.api.ts';
 import { dropTable, keepTable } from './keep-table.ts';
 import { ownDrafts } from './own-draft.ts';
 import { uploadedTable } from './upload-table.ts';
-
-const roleSchema = z.enum(TABLE_ROLES);
-const committedSchema = z.object({ patternId: z.uuid(), revisionId: z.uuid() });
 
 /** What is brought to a draft and what becomes of it: its tables, and the commit. */
 export function importTableRoutes(deps: RouteDeps & { files: FileStore }): Router {
   const router = Router();
   const { own, read } = ownDrafts(deps);
   function roleOf(request: Request) {
-    return found(roleSchema.safeParse(request.params['role']).data, 'table');
+    return found(tableRoleSchema.safeParse(request.params['role']).data, 'table');
   }
 
   router.put('/api/imports/:id/tables/:role', async (request, reply) => {

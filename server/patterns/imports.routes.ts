@@ -1,11 +1,6 @@
 import { Router, type Request } from 'express';
-import { z } from 'zod';
 import { pageOf, pageQuerySchema } from '../../shared/paging.ts';
-import {
-  draftDetailsSchema,
-  importDraftSummarySchema,
-  importPatchSchema,
-} from '../../shared/patterns/imports.schema.ts';
+import { importDraftSummarySchema, importPatchSchema } from '../../shared/patterns/imports.schema.ts';
 import type { FileStore } from '../files/file-store.ts';
 import { answer } from '../http/answer.ts';
 import type { RouteDeps } from '../http/deps.ts';
@@ -13,13 +8,12 @@ import { toPage } from '../http/paging.ts';
 import { parseBody, parseQuery } from '../http/parse.ts';
 import { found, notFound } from '../http/problem.ts';
 import { changeDraft } from './change-draft.ts';
+import { startSchema } from './imports.api.ts';
 import { createDraft, listDrafts } from './imports.store.ts';
 import { discardDraft } from './keep-table.ts';
 import { ownDrafts } from './own-draft.ts';
 import { canUsePattern } from './patterns.policy.ts';
 import { findPattern } from './patterns.store.ts';
-
-const startSchema = z.object({ patternId: z.uuid().optional(), details: draftDetailsSchema.optional() });
 
 export function importRoutes(deps: RouteDeps & { files: FileStore }): Router {
   const { db, requireUser } = deps;

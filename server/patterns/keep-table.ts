@@ -8,7 +8,7 @@ import { deleteFiles, insertFile } from './files.store.ts';
 import { deleteDraft, holdDraft, setDraftFile, type KeptDraft } from './imports.store.ts';
 import { readKept } from './read-draft.ts';
 import { readTable, refusalOf } from './reading/read-table.ts';
-import { removeBytes } from './remove-bytes.ts';
+import { removeBytes } from '../files/remove-bytes.ts';
 import type { UploadedTable } from './upload-table.ts';
 
 type Deps = Pick<RouteDeps, 'db' | 'log'> & { files: FileStore };

@@ -9,9 +9,10 @@ import {
 import type { FileStore } from '../files/file-store.ts';
 import { answer } from '../http/answer.ts';
 import type { RouteDeps } from '../http/deps.ts';
-import { listQuerySchema, toPage } from '../http/paging.ts';
+import { toPage } from '../http/paging.ts';
 import { parseId, parsePatch, parseQuery } from '../http/parse.ts';
 import { found, notFound, Problem } from '../http/problem.ts';
+import { patternQuerySchema } from './patterns.api.ts';
 import { canUsePattern } from './patterns.policy.ts';
 import {
   deletePattern,
@@ -20,11 +21,10 @@ import {
   listPatterns,
   updatePattern,
 } from './patterns.store.ts';
-import { removeBytes } from './remove-bytes.ts';
+import { removeBytes } from '../files/remove-bytes.ts';
 import { listRevisions } from './revisions.store.ts';
 
 const THING = 'pattern';
-const querySchema = listQuerySchema.extend({ kind: patternInputSchema.shape.kind.optional() });
 
 export function patternRoutes({ db, files, log, requireUser }: RouteDeps & { files: FileStore }): Router {
   const router = Router();
@@ -39,7 +39,7 @@ export function patternRoutes({ db, files, log, requireUser }: RouteDeps & { fil
 
   router.get('/api/patterns', async (request, reply) => {
     const user = await requireUser(request);
-    const query = parseQuery(querySchema, request);
+    const query = parseQuery(patternQuerySchema, request);
     const { patterns, total } = await listPatterns(db, user.id, query);
     reply.json(answer(pageOf(patternSummarySchema), toPage(patterns, total, query)));
   });

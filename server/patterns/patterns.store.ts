@@ -15,7 +15,7 @@ import { inTransaction } from '../db/transaction.ts';
 import { rowsOf, type ListQuery } from '../http/paging.ts';
 import { deleteFiles } from './files.store.ts';
 import { importDraft, pattern, patternRevision } from './patterns.table.ts';
-import { findRevision, insertRevision, type RevisionFiles } from './revisions.store.ts';
+import { findRevision, insertRevision, type OwnedRevision, type RevisionFiles } from './revisions.store.ts';
 
 /** A pattern in a list, and whose it is. */
 export interface OwnedPattern extends PatternSummary {
@@ -98,6 +98,17 @@ export async function createPattern(
   });
   await insertRevision(tx, { id: revisionId, patternId, number: 1, table, ...files, createdAt: now });
   return { patternId, revisionId };
+}
+
+/** The latest revision of a pattern, in a transaction: until it ends nobody adds another. Null where the pattern is gone. */
+export async function holdLatestRevision(tx: Db, patternId: string): Promise<OwnedRevision | null> {
+  // The first thing a transaction reads: what it reads afterwards is as it was once the row was held.
+  const [held] = await tx
+    .select({ latestId: pattern.latestRevisionId })
+    .from(pattern)
+    .where(eq(pattern.id, patternId))
+    .for('update');
+  return held === undefined ? null : findRevision(tx, held.latestId);
 }
 
 /** The next revision of a pattern, in a transaction: holding the pattern keeps another from taking the same number. */

@@ -1,5 +1,4 @@
 import { Router, type Request } from 'express';
-import { z } from 'zod';
 import { pageOf } from '../../shared/paging.ts';
 import { makePlan } from '../../shared/plans/make-plan.ts';
 import { refuseOptions } from '../../shared/plans/not-reckoned.ts';
@@ -15,13 +14,11 @@ import { reckon } from '../http/misuse.ts';
 import { listQuerySchema, toPage } from '../http/paging.ts';
 import { parseBody, parseId, parsePatch, parseQuery } from '../http/parse.ts';
 import { found, notFound, refuseIfAny } from '../http/problem.ts';
+import { renameSchema } from './plans.api.ts';
 import { canUsePlan } from './plans.policy.ts';
 import { createPlan, deletePlan, findPlan, listPlans, renamePlan } from './plans.store.ts';
 
 const THING = 'plan';
-
-/** A plan never changes but for its name: anything else sent is refused, not dropped. */
-const renameSchema = z.strictObject({ name: savedPlanInputSchema.shape.name });
 
 export function planRoutes({ db, requireUser }: RouteDeps): Router {
   const router = Router();

@@ -1,5 +1,5 @@
 import type { QueryClient } from '@tanstack/react-query';
-import type { ReactNode } from 'react';
+import { useEffect, useRef, type ReactNode } from 'react';
 import { redirect, type LoaderFunctionArgs } from 'react-router-dom';
 import { PageHeading } from '../ui/page-heading.tsx';
 import { nextAddress } from './next-address.ts';
@@ -15,20 +15,24 @@ export const skipWhenSignedIn =
     return null;
   };
 
-/** The frame that signing in and signing up share. */
-export function EnterPage({
-  title,
-  lead,
-  children,
-}: {
+interface EnterPageProps {
   title: string;
   lead: ReactNode;
+  /** It took the place of another step on the same address, so that the focus has to be brought to its heading. */
+  isLaterStep?: boolean;
   children: ReactNode;
-}) {
+}
+
+/** The frame that signing in, signing up and what the mails lead to share. */
+export function EnterPage({ title, lead, isLaterStep = false, children }: EnterPageProps) {
+  const box = useRef<HTMLDivElement>(null);
+  useEffect(() => {
+    if (isLaterStep) box.current?.querySelector('h1')?.focus();
+  }, [isLaterStep, title]);
   return (
-    <div className="max-w-[26rem] pt-2 md:pt-8">
+    <div ref={box} className="max-w-[27rem] pt-2 md:pt-8">
       <PageHeading title={title} />
-      <p className="mt-3 mb-8 text-ink-2">{lead}</p>
+      <div className="mt-3 mb-8 space-y-2 text-ink-2">{lead}</div>
       {children}
     </div>
   );

@@ -2,13 +2,17 @@ import { useState, type ComponentProps } from 'react';
 import { Button } from '../ui/button.tsx';
 import { TextField } from '../ui/field.tsx';
 
+type PasswordFieldProps = Omit<ComponentProps<typeof TextField>, 'label' | 'type' | 'after'> & {
+  label?: string;
+};
+
 /** A password, with a button that shows what is typed. */
-export function PasswordField(props: Omit<ComponentProps<typeof TextField>, 'label' | 'type' | 'after'>) {
+export function PasswordField({ label = 'Password', ...props }: PasswordFieldProps) {
   const [isShown, setShown] = useState(false);
   return (
     <TextField
       {...props}
-      label="Password"
+      label={label}
       type={isShown ? 'text' : 'password'}
       autoCapitalize="none"
       spellCheck={false}
@@ -16,7 +20,7 @@ export function PasswordField(props: Omit<ComponentProps<typeof TextField>, 'lab
         <Button
           kind="quiet"
           aria-pressed={isShown}
-          aria-label="Show the password"
+          aria-label={`Show the ${label.toLowerCase()}`}
           onClick={() => setShown(!isShown)}
         >
           {isShown ? 'Hide' : 'Show'}

@@ -1,4 +1,5 @@
 import { zodResolver } from '@hookform/resolvers/zod';
+import { useState } from 'react';
 import { useForm } from 'react-hook-form';
 import { useLocation } from 'react-router-dom';
 import { signInSchema } from '../../shared/account.ts';
@@ -11,7 +12,8 @@ import { summaryOf } from '../ui/use-server-errors.ts';
 import { enterWords } from './enter-error.ts';
 import { EnterPage, skipWhenSignedIn } from './enter-page.tsx';
 import { PasswordField } from './password-field.tsx';
-import { useEnter } from './use-enter.ts';
+import { CodeStep } from './code-step.tsx';
+import { useSignIn } from './use-enter.ts';
 
 export const loader = skipWhenSignedIn;
 
@@ -21,28 +23,37 @@ const FIELDS = [
 ] as const;
 
 export function Component() {
+  const [isCodeAsked, setCodeAsked] = useState(false);
+  if (isCodeAsked) return <CodeStep onStartOver={() => setCodeAsked(false)} />;
+  return <PasswordStep onCode={() => setCodeAsked(true)} />;
+}
+
+function PasswordStep({ onCode }: { onCode: () => void }) {
   const { search } = useLocation();
-  const enter = useEnter<{ email: string; password: string }>('/api/auth/sign-in/email');
+  const enter = useSignIn();
   const form = useForm({
     resolver: zodResolver(signInSchema),
     defaultValues: { email: '', password: '' },
     shouldFocusError: false,
   });
   const { errors, submitCount } = form.formState;
+  const send = form.handleSubmit((values) =>
+    enter.mutate(values, {
+      onSuccess: (outcome) => {
+        if (outcome === 'code') onCode();
+      },
+    }),
+  );
   return (
     <EnterPage
       title="Sign in"
       lead={
-        <>
+        <p>
           New here? <TextLink to={{ pathname: paths.signUp, search }}>Make an account</TextLink>
-        </>
+        </p>
       }
     >
-      <form
-        noValidate
-        className="space-y-6"
-        onSubmit={(event) => void form.handleSubmit((values) => enter.mutate(values))(event)}
-      >
+      <form noValidate className="space-y-6" onSubmit={(event) => void send(event)}>
         <FormErrors
           items={summaryOf(errors, FIELDS, enter.isError ? [enterWords(enter.error)] : [])}
           attempt={submitCount + enter.failureCount}
@@ -63,9 +74,12 @@ export function Component() {
           autoComplete="current-password"
           error={errors.password?.message}
         />
-        <Button type="submit" kind="primary" pending={enter.isPending}>
-          {enter.isPending ? 'Signing in' : 'Sign in'}
-        </Button>
+        <div className="flex flex-wrap items-center gap-x-7 gap-y-3">
+          <Button type="submit" kind="primary" pending={enter.isPending}>
+            {enter.isPending ? 'Signing in' : 'Sign in'}
+          </Button>
+          <TextLink to={paths.forgottenPassword}>Forgotten the password?</TextLink>
+        </div>
       </form>
     </EnterPage>
   );

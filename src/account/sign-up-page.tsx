@@ -1,6 +1,7 @@
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useForm } from 'react-hook-form';
 import { useLocation } from 'react-router-dom';
+import { MailboxHint } from '../mailbox/parts/mailbox-hint.tsx';
 import { PASSWORD_MIN, signUpSchema } from '../../shared/account.ts';
 import { paths } from '../paths.ts';
 import { Button } from '../ui/button.tsx';
@@ -11,7 +12,7 @@ import { summaryOf, useServerErrors } from '../ui/use-server-errors.ts';
 import { enterWords } from './enter-error.ts';
 import { EnterPage, skipWhenSignedIn } from './enter-page.tsx';
 import { PasswordField } from './password-field.tsx';
-import { useEnter } from './use-enter.ts';
+import { useGoOn, useSignUp } from './use-enter.ts';
 
 export const loader = skipWhenSignedIn;
 
@@ -24,7 +25,7 @@ const NAMES = FIELDS.map(({ name }) => name);
 
 export function Component() {
   const { search } = useLocation();
-  const enter = useEnter<{ name: string; email: string; password: string }>('/api/auth/sign-up/email');
+  const enter = useSignUp();
   const form = useForm({
     resolver: zodResolver(signUpSchema),
     defaultValues: { name: '', email: '', password: '' },
@@ -36,14 +37,15 @@ export function Component() {
     server.clear();
     enter.mutate(values, { onError: server.place });
   });
+  if (enter.isSuccess) return <MailSent email={enter.variables.email} isIn={enter.data === 'in'} />;
   return (
     <EnterPage
       title="Make an account"
       lead={
-        <>
+        <p>
           You have one? <TextLink to={{ pathname: paths.signIn, search }}>Sign in</TextLink>. Measurements are
           private: they are shown to nobody but you.
-        </>
+        </p>
       }
     >
       <form noValidate className="space-y-6" onSubmit={(event) => void submit(event)}>
@@ -80,6 +82,38 @@ export function Component() {
           {enter.isPending ? 'Making the account' : 'Make the account'}
         </Button>
       </form>
+    </EnterPage>
+  );
+}
+
+/** The account is made; what is left to do is in the mail. */
+function MailSent({ email, isIn }: { email: string; isIn: boolean }) {
+  const goOn = useGoOn();
+  return (
+    <EnterPage
+      title={isIn ? 'You are in' : 'Look into your mail'}
+      isLaterStep
+      lead={
+        isIn ? (
+          <p className="break-words">
+            We have also written to {email}. Open the link in that mail within a day, so that we can reach you
+            when you need a new password.
+          </p>
+        ) : (
+          <p className="break-words">We have sent a mail to {email}. It says how to go on.</p>
+        )
+      }
+    >
+      <p className="mb-7">
+        <MailboxHint />
+      </p>
+      {isIn ? (
+        <Button kind="primary" onClick={() => void goOn()}>
+          Go on
+        </Button>
+      ) : (
+        <TextLink to={paths.signIn}>To signing in</TextLink>
+      )}
     </EnterPage>
   );
 }

@@ -24,6 +24,16 @@ export async function requestNothing(path: string, options: RequestOptions): Pro
   await send(path, options);
 }
 
+/** As `request`, for a file that is made when it is asked for: its bytes, and the name the server gives it. */
+export async function requestFile(
+  path: string,
+  options: RequestOptions,
+): Promise<{ bytes: Blob; name: string | null }> {
+  const response = await send(path, options);
+  const disposition = response.headers.get('content-disposition') ?? '';
+  return { bytes: await response.blob(), name: /filename="?([\w.-]+)"?/.exec(disposition)?.[1] ?? null };
+}
+
 async function send(path: string, options: RequestOptions): Promise<Response> {
   const isForm = options.body instanceof FormData;
   let response: Response;

@@ -1,4 +1,4 @@
-import { Link } from 'react-router-dom';
+import { Link, NavLink } from 'react-router-dom';
 import type { Me } from '../../shared/me.ts';
 import { paths } from '../paths.ts';
 import { useSignOut } from './use-sign-out.ts';
@@ -22,7 +22,15 @@ export function AccountCorner({ me }: { me: Me | undefined }) {
   }
   return (
     <div className="ml-auto flex min-w-0 items-center gap-x-5 text-note md:text-base">
-      <span className="truncate text-ink-2">{me.user.name}</span>
+      <NavLink
+        to={paths.account}
+        className={({ isActive }) =>
+          `${quiet} min-w-0 no-underline ${isActive ? 'font-semibold text-ink' : 'text-ink-2 hover:text-ink'}`
+        }
+      >
+        <span className="sr-only">Your account: </span>
+        <span className="truncate">{me.user.name}</span>
+      </NavLink>
       <button
         type="button"
         disabled={signOut.isPending}

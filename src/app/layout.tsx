@@ -13,6 +13,7 @@ const SECTIONS = [
   { to: paths.patterns, word: 'Patterns' },
   { to: paths.plans, word: 'Plans' },
 ];
+const ADMIN_SECTION = { to: '/admin', word: 'Admin' };
 
 /** The frame of every page: the wordmark, where one can go, who is here, and the page itself. */
 export function Layout() {
@@ -56,7 +57,7 @@ function Frame({ children, mainRef }: { children: ReactNode; mainRef?: React.Ref
       <header className="border-b border-rule print:hidden">
         <div className="mx-auto flex min-h-17 max-w-[90rem] items-center gap-x-9 px-5 md:min-h-19 md:px-8 xl:px-14">
           <Wordmark />
-          {user && <Sections className="hidden gap-x-7 md:flex" />}
+          {user && <Sections isAdmin={user.role === 'admin'} className="hidden gap-x-7 md:flex" />}
           <AccountCorner me={me} />
         </div>
       </header>
@@ -70,7 +71,8 @@ function Frame({ children, mainRef }: { children: ReactNode; mainRef?: React.Ref
       </main>
       {user && (
         <Sections
-          className="sticky bottom-0 z-10 grid grid-cols-3 border-t border-rule bg-paper pb-[env(safe-area-inset-bottom)] md:hidden"
+          isAdmin={user.role === 'admin'}
+          className="sticky bottom-0 z-10 grid auto-cols-fr grid-flow-col border-t border-rule bg-paper pb-[env(safe-area-inset-bottom)] md:hidden"
           onPhone
         />
       )}
@@ -89,13 +91,21 @@ function Wordmark() {
   );
 }
 
-function Sections({ className, onPhone = false }: { className: string; onPhone?: boolean }) {
+function Sections({
+  className,
+  isAdmin,
+  onPhone = false,
+}: {
+  className: string;
+  isAdmin: boolean;
+  onPhone?: boolean;
+}) {
   const shape = onPhone
     ? 'flex min-h-13 items-center justify-center border-t-3 -mt-px text-note'
     : 'flex min-h-11 items-center border-b-2 border-t-2 border-t-transparent';
   return (
     <nav aria-label="Main" className={`${className} print:hidden`}>
-      {SECTIONS.map(({ to, word }) => (
+      {(isAdmin ? [...SECTIONS, ADMIN_SECTION] : SECTIONS).map(({ to, word }) => (
         <NavLink
           key={to}
           to={to}

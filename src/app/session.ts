@@ -29,3 +29,21 @@ export const forSignedIn =
       throw redirect(address);
     }
   };
+
+/** Guards a page of the administration: whoever is signed in but no administrator finds nothing there. */
+export const forAdministrators = (
+  client: QueryClient,
+  read: ((args: LoaderFunctionArgs) => unknown) | null,
+) =>
+  forSignedIn(client, async (args) => {
+    const me = await client.query(meQuery);
+    if (me.user?.role !== 'admin') throw new Response(null, { status: 404 });
+    try {
+      return await read?.(args);
+    } catch (error) {
+      // The role was taken away since the browser last asked.
+      if (!(error instanceof ProblemError) || error.status !== 403) throw error;
+      await client.invalidateQueries({ queryKey: meQuery.queryKey });
+      throw new Response(null, { status: 404 });
+    }
+  });

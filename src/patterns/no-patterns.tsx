@@ -10,9 +10,12 @@ export function NoPatterns() {
       <EmptyState
         title="Bring in your first pattern"
         action={
-          <ButtonLink kind="primary" to={paths.newImport}>
-            Add a pattern
-          </ButtonLink>
+          <>
+            <ButtonLink kind="primary" to={paths.newImport}>
+              Add a pattern
+            </ButtonLink>
+            <ButtonLink to={paths.newPattern}>Type one in</ButtonLink>
+          </>
         }
       >
         <p>

@@ -4,6 +4,7 @@ import { paths } from '../paths.ts';
 import { ButtonLink, TextLink } from '../ui/link.tsx';
 import { PageHeading } from '../ui/page-heading.tsx';
 import { param } from '../ui/param.ts';
+import { CopyPattern } from './copy-pattern.tsx';
 import { DeletePattern } from './delete-pattern.tsx';
 import { PatternFacts } from './pattern-facts.tsx';
 import { sayMaker } from './pattern-words.ts';
@@ -42,12 +43,16 @@ export function Component() {
       <TakeAway revision={pattern.revision} />
       <RevisionList patternId={patternId} latestId={pattern.latestRevisionId} />
       <div className="mt-12 flex flex-wrap gap-x-7 border-t border-rule pt-4 print:hidden">
+        <ButtonLink kind="quiet" to={paths.editTable(patternId)}>
+          Edit the tables
+        </ButtonLink>
         <ButtonLink kind="quiet" to={paths.editPattern(patternId)}>
           Change title, kind or notes
         </ButtonLink>
         <ButtonLink kind="quiet" to={`${paths.newImport}?pattern=${patternId}`}>
           Bring in new tables
         </ButtonLink>
+        <CopyPattern patternId={patternId} />
         <DeletePattern pattern={pattern} />
       </div>
     </>

@@ -40,9 +40,12 @@ export function Component() {
         title="Patterns"
         actions={
           !isEmpty && (
-            <ButtonLink kind="primary" to={paths.newImport}>
-              Add a pattern
-            </ButtonLink>
+            <>
+              <ButtonLink kind="primary" to={paths.newImport}>
+                Add a pattern
+              </ButtonLink>
+              <ButtonLink to={paths.newPattern}>Type one in</ButtonLink>
+            </>
           )
         }
       />

@@ -2,6 +2,8 @@ import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query
 import { z } from 'zod';
 import type { GarmentKind } from '../../shared/fit/fit-words.ts';
 import { pageOf } from '../../shared/paging.ts';
+import { comparisonSchema } from '../../shared/patterns/comparison.schema.ts';
+import type { NewPattern, TableEdit } from '../../shared/patterns/edits.schema.ts';
 import {
   importDraftSchema,
   importDraftSummarySchema,
@@ -49,6 +51,13 @@ export const revisionQuery = (revisionId: string) =>
       request(`/api/pattern-revisions/${revisionId}`, patternRevisionSchema, { signal }),
   });
 
+export const comparisonQuery = (fromId: string, toId: string) =>
+  queryOptions({
+    queryKey: ['patterns', 'comparison', fromId, toId],
+    queryFn: ({ signal }) =>
+      request(`/api/pattern-revisions/${fromId}/compare?with=${toId}`, comparisonSchema, { signal }),
+  });
+
 export const draftsQuery = (page = 1) =>
   queryOptions({
     queryKey: ['imports', 'list', { page }],
@@ -91,6 +100,17 @@ export const useUpdatePattern = (patternId: string) =>
   usePatternMutation((body: Partial<PatternInput>) =>
     request(`/api/patterns/${patternId}`, patternSchema, { method: 'PATCH', body }),
   );
+
+export const useSaveTable = (patternId: string) =>
+  usePatternMutation((body: TableEdit) =>
+    request(`/api/patterns/${patternId}/revisions`, patternRevisionSchema, { method: 'POST', body }),
+  );
+
+export const useTypePattern = () =>
+  usePatternMutation((body: NewPattern) => request('/api/patterns', patternSchema, { method: 'POST', body }));
+
+export const useCopyPattern = (patternId: string) =>
+  usePatternMutation(() => request(`/api/patterns/${patternId}/copy`, patternSchema, { method: 'POST' }));
 
 /** What shows the pattern stands until the page is left: asking for it again would find nothing. */
 export function useDeletePattern() {

@@ -35,9 +35,19 @@ export function RevisionList({ patternId, latestId }: { patternId: string; lates
         <>
           <ul className="mt-2 max-w-[44rem] border-t border-rule">
             {data.items.map((revision) => (
-              <RevisionRow key={revision.id} revision={revision} isLatest={revision.id === latestId} />
+              <RevisionRow
+                key={revision.id}
+                revision={revision}
+                isLatest={revision.id === latestId}
+                latestId={latestId}
+              />
             ))}
           </ul>
+          {data.total > 1 && (
+            <p className="mt-3">
+              <TextLink to={paths.compareRevisions(patternId)}>See what changed between revisions</TextLink>
+            </p>
+          )}
           {data.total > data.items.length && (
             <p className="mt-2 text-note text-ink-2">
               The newest {data.items.length} of {data.total}.
@@ -49,7 +59,16 @@ export function RevisionList({ patternId, latestId }: { patternId: string; lates
   );
 }
 
-function RevisionRow({ revision, isLatest }: { revision: PatternRevision; isLatest: boolean }) {
+function RevisionRow({
+  revision,
+  isLatest,
+  latestId,
+}: {
+  revision: PatternRevision;
+  isLatest: boolean;
+  latestId: string;
+}) {
+  const compared = new URLSearchParams({ from: revision.id, to: latestId }).toString();
   const name = `Revision ${revision.number}`;
   return (
     <li className="flex flex-wrap items-baseline gap-x-5 border-b border-rule py-2.5">
@@ -62,7 +81,13 @@ function RevisionRow({ revision, isLatest }: { revision: PatternRevision; isLate
       )}
       <span className="text-note text-ink-2">
         {printMoment(revision.createdAt)} · {saySizes(revision.table.sizes)}
+        {revision.chartFile === null && revision.finishedFile === null && ' · without a file'}
       </span>
+      {!isLatest && (
+        <TextLink to={`${paths.compareRevisions(revision.patternId)}?${compared}`} className="text-note">
+          Compare with the latest<span className="sr-only">: {name}</span>
+        </TextLink>
+      )}
     </li>
   );
 }

@@ -33,7 +33,8 @@ export function Component() {
         actions={<ButtonLink to={`${paths.fit}?revision=${revision.id}`}>Plan with this revision</ButtonLink>}
       />
       <p className="mt-3 text-ink-2">
-        Brought in {printMoment(revision.createdAt)}. {saySizes(revision.table.sizes)}.
+        {(revision.chartFile ?? revision.finishedFile) ? 'Brought in' : 'Kept, without a file,'}{' '}
+        {printMoment(revision.createdAt)}. {saySizes(revision.table.sizes)}.
       </p>
       {!isLatest && (
         <Notice className="mt-5 max-w-[42rem]">

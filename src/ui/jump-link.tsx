@@ -14,15 +14,19 @@ export function jumpTo(id: string) {
 export function JumpLink({
   to,
   className,
+  tabIndex,
   children,
 }: {
   to: string;
   className?: string;
+  /** −1 where the way to it is another, as in a grid. */
+  tabIndex?: -1;
   children: ReactNode;
 }) {
   return (
     <a
       href={`#${to}`}
+      tabIndex={tabIndex}
       className={`underline decoration-1 underline-offset-4 hover:decoration-2 ${className ?? ''}`}
       onClick={(event) => {
         event.preventDefault();

@@ -24,11 +24,12 @@ describe('health', () => {
     const app = createApp({ ...test, db, log, auth: createAuth({ db, config: test.config, log }) });
     const answer = await supertest(app).get('/api/health').expect(503);
     expect(answer.body).toEqual({ status: 'degraded', version: about.version, database: 'silent' });
-    const signedUp = await test
+    const { user } = await test.signedIn();
+    const signedIn = await test
       .anonymous()
-      .post('/api/auth/sign-up/email')
-      .send({ name: 'Ada', email: 'ada@example.org', password: PASSWORD });
-    const cookie = String(signedUp.headers['set-cookie']).split(';')[0] ?? '';
+      .post('/api/auth/sign-in/email')
+      .send({ email: user.email, password: PASSWORD });
+    const cookie = String(signedIn.headers['set-cookie']).split(';')[0] ?? '';
     const people = await supertest(app).get('/api/people').set('Cookie', cookie).expect(503);
     expect(people.body.type).toBe('/problems/unavailable');
     const signIn = await supertest(app)

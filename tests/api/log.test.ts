@@ -2,6 +2,7 @@ import { pino } from 'pino';
 import supertest from 'supertest';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { createApp } from '../../server/app.ts';
+import { createDatabase } from '../../server/db/client.ts';
 import { measurementSet } from '../../server/people/people.table.ts';
 import { sql } from 'drizzle-orm';
 import { ORIGIN, PASSWORD, testApp, type SignedIn, type TestApp } from '../support/app.ts';
@@ -67,6 +68,29 @@ describe('the log', () => {
       expect([secret, written.includes(secret)]).toEqual([secret, false]);
     }
     expect(await test.db.select().from(measurementSet)).toEqual([]);
+  });
+});
+
+describe('the log of a failure below the query', () => {
+  it('holds neither the query nor its values where the connection is gone', async () => {
+    const lines: string[] = [];
+    const log = pino({ level: 'trace' }, { write: (line: string) => void lines.push(line) });
+    const { db, close } = createDatabase(test.config.databaseUrl, { connections: 1 });
+    await close();
+    const failing = new Proxy(test.db, {
+      get: (target, key) => (key === 'insert' ? db.insert.bind(db) : (Reflect.get(target, key) as unknown)),
+    });
+    const ask = supertest.agent(createApp({ ...test, db: failing, log })).set('Origin', ORIGIN);
+    await ask
+      .post('/api/people')
+      .set('Cookie', await cookieOf())
+      .send({ name: 'Maria Theresia', stage: 'adult', chestWord: 'bust', unit: 'cm', notes: 'hip 1063.7' })
+      .expect(500);
+    const written = lines.join('');
+    expect(written).toContain('a request failed');
+    for (const secret of ['Theresia', '1063.7', 'insert into', 'INSERT', 'params']) {
+      expect([secret, written.includes(secret)]).toEqual([secret, false]);
+    }
   });
 });
 

@@ -2,12 +2,16 @@
 import type { Figure } from './figure.ts';
 import { run as frontPage } from './front-page.ts';
 import { run as planFit } from './plan-fit.ts';
+import { run as planRoute } from './plan-route.ts';
+import { run as startDevelopment } from './start-development.ts';
 import { run as start } from './start.ts';
 
 const benches: Record<string, () => Promise<Figure[]>> = {
   'plan-fit': planFit,
+  'plan-route': planRoute,
   'front-page': frontPage,
   start,
+  'start-development': startDevelopment,
 };
 const wanted = process.argv.slice(2);
 

@@ -24,7 +24,7 @@ describe('every page', () => {
     async (name) => {
       const drawn = pages.find((page) => page.name === name);
       if (!drawn) throw new Error(`${name} was not found`);
-      const page = await visit.open(drawn.path, drawn.isPublic ? {} : { as: 'member' });
+      const page = await visit.open(drawn.path, drawn.as === null ? {} : { as: drawn.as });
       await page.locator('h1').waitFor();
       await page.waitForLoadState('networkidle');
       expect(await page.title()).toMatch(/Leeway/);

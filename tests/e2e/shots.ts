@@ -13,7 +13,8 @@ const faults: string[] = [];
 
 async function main(): Promise<number> {
   mkdirSync(FOLDER, { recursive: true });
-  const app = await startServedApp();
+  // Directly, so that the mailbox is there to be drawn.
+  const app = await startServedApp({ isDirect: true });
   const browser = await launchBrowser();
   try {
     await drawAll(browser, app);
@@ -32,23 +33,24 @@ async function drawAll(browser: Browser, app: ServedApp): Promise<void> {
     throw new Error(`There is no such page. The pages: ${pages.map(({ name }) => name).join(', ')}`);
   for (const viewport of [PHONE, DESK]) {
     for (const colorScheme of ['light', 'dark'] as const) {
-      const open = await newVisit(browser, app.url, { viewport, colorScheme });
-      const signedIn = await newVisit(browser, app.url, { viewport, colorScheme });
-      await signIn(signedIn, app.url, accountOf(app.signIns, 'member'));
+      const visit = () => newVisit(browser, app.url, { viewport, colorScheme, isDirect: true });
+      const contexts = { nobody: await visit(), member: await visit(), admin: await visit() };
+      for (const role of ['member', 'admin'] as const) {
+        await signIn(contexts[role], app.url, accountOf(app.signIns, role));
+      }
       for (const drawn of chosen) {
-        const page = await (drawn.isPublic ? open : signedIn).newPage();
+        const page = await contexts[drawn.as ?? 'nobody'].newPage();
         watchPage(page, faults);
         await draw(page, drawn, `${drawn.name}-${String(viewport.width)}-${colorScheme}.png`);
         await page.close();
       }
-      await open.close();
-      await signedIn.close();
+      for (const context of Object.values(contexts)) await context.close();
     }
   }
 }
 
 async function findPages(browser: Browser, app: ServedApp): Promise<DrawnPage[]> {
-  const context = await newVisit(browser, app.url);
+  const context = await newVisit(browser, app.url, { isDirect: true });
   await signIn(context, app.url, accountOf(app.signIns, 'member'));
   const pages = await everyPage(context.request, app.url);
   await context.close();

@@ -34,7 +34,7 @@ export interface TestApp {
   config: Config;
   /** Nobody: an agent without a session. */
   anonymous: () => Agent;
-  signedIn: (options?: { role?: Role; name?: string }) => Promise<SignedIn>;
+  signedIn: (options?: { role?: Role; name?: string; isVerified?: boolean }) => Promise<SignedIn>;
   /** What the server wrote down as failed since the last call; a test that leaves any behind fails. */
   takeErrors: () => unknown[];
 }
@@ -43,11 +43,18 @@ export interface TestApp {
 export async function testApp(
   options: { limits?: boolean; config?: Partial<Config>; client?: { folder: string } } = {},
 ): Promise<TestApp> {
-  const { db, url } = await testDatabase();
+  const { db, url, poolUse } = await testDatabase();
   const config = { ...testConfig(url), ...options.config };
   const { log, takeErrors } = listeningLog();
   const auth = createAuth({ db, config, log, limits: options.limits ?? false });
-  const app = createApp({ db, auth, log, config, ...(options.client ? { client: options.client } : {}) });
+  const app = createApp({
+    db,
+    auth,
+    log,
+    config,
+    poolUse,
+    ...(options.client ? { client: options.client } : {}),
+  });
   afterEach(() => expect(takeErrors(), 'the server failed').toEqual([]));
   return {
     app,
@@ -76,6 +83,7 @@ function testConfig(databaseUrl: string): Config {
     mailFrom: 'Leeway <leeway@127.0.0.1>',
     trustProxy: 0,
     isDemo: false,
+    hasMailbox: false,
   };
 }
 
@@ -86,18 +94,24 @@ function agentOf(app: Express, cookie?: string): Agent {
   return agent;
 }
 
-/** Signs up without a request, so that a file of tests does not spend its time on hashing and rate limits. */
+/** Makes accounts without a request and without mail, so that a file of tests spends no time on limits. */
 function signerIn(app: Express, db: Db, auth: Auth): TestApp['signedIn'] {
   let count = 0;
-  return async ({ role = 'member', name } = {}) => {
+  let hashed: Promise<string> | null = null;
+  return async ({ role = 'member', name, isVerified = false } = {}) => {
     count += 1;
     const email = `person-${String(count)}-${Math.random().toString(36).slice(2, 8)}@example.org`;
-    const response = await auth.api.signUpEmail({
-      body: { name: name ?? `Person ${String(count)}`, email, password: PASSWORD },
-      asResponse: true,
-    });
+    const { internalAdapter, password } = await auth.$context;
+    hashed ??= password.hash(PASSWORD);
+    const made = await internalAdapter.createUser(
+      { name: name ?? `Person ${String(count)}`, email, emailVerified: isVerified },
+      { method: 'email-password' },
+    );
+    const credential = { providerId: 'credential', accountId: made.id, password: await hashed };
+    await internalAdapter.linkAccount({ userId: made.id, ...credential });
+    if (role !== 'member') await db.update(userTable).set({ role }).where(eq(userTable.id, made.id));
+    const response = await auth.api.signInEmail({ body: { email, password: PASSWORD }, asResponse: true });
     const { user } = signedUpSchema.parse(await response.json());
-    if (role !== 'member') await db.update(userTable).set({ role }).where(eq(userTable.id, user.id));
     const cookie = response.headers
       .getSetCookie()
       .map((text) => text.split(';')[0] ?? '')

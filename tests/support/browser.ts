@@ -27,6 +27,8 @@ export interface VisitOptions {
   viewport?: { width: number; height: number };
   colorScheme?: 'light' | 'dark';
   reducedMotion?: 'reduce' | 'no-preference';
+  /** Without the header of a proxy, as a browser on the same machine comes; all that do share one address. */
+  isDirect?: boolean;
 }
 
 /** A browser for somebody: its own cookies and, to the server, its own network address. */
@@ -41,7 +43,8 @@ export function newVisit(
     viewport: options.viewport ?? DESK,
     colorScheme: options.colorScheme ?? 'light',
     reducedMotion: options.reducedMotion ?? 'reduce',
-    extraHTTPHeaders: { 'x-forwarded-for': `10.${part()}.${part()}.${part()}` },
+    extraHTTPHeaders:
+      options.isDirect === true ? {} : { 'x-forwarded-for': `10.${part()}.${part()}.${part()}` },
   });
 }
 
@@ -127,14 +130,17 @@ export function accountOf(signIns: DemoSignIn[], role: string): DemoSignIn {
   return found;
 }
 
+/** The password of every account that these tests make. */
+export const NEW_PASSWORD = 'a quiet tape measure';
+
 async function signUp(context: BrowserContext, baseURL: string): Promise<void> {
-  const response = await context.request.post(`${baseURL}/api/auth/sign-up/email`, {
-    headers: { origin: baseURL },
-    data: {
-      name: 'Robin',
-      email: `robin-${Math.random().toString(36).slice(2)}@example.org`,
-      password: 'a quiet tape measure',
-    },
-  });
-  if (!response.ok()) throw new Error(`Signing up answered ${String(response.status())}.`);
+  const email = `robin-${Math.random().toString(36).slice(2)}@example.org`;
+  const account = { email, password: NEW_PASSWORD };
+  const post = async (path: string, data: object) => {
+    const headers = { origin: baseURL };
+    const response = await context.request.post(`${baseURL}/api/auth/${path}`, { headers, data });
+    if (!response.ok()) throw new Error(`${path} answered ${String(response.status())}.`);
+  };
+  await post('sign-up/email', { name: 'Robin', ...account });
+  await post('sign-in/email', account);
 }

@@ -33,14 +33,16 @@ interface LaunchOptions {
   environment?: Record<string, string>;
   /** As a person would start it; otherwise the launcher alone. */
   isThroughNpm?: boolean;
+  /** As it is started while it is being written, through npm or not. */
+  isDevelopment?: boolean;
 }
 
 /** Starts the product and answers at once; `untilReady` waits for it. */
 export async function launch(options: LaunchOptions): Promise<Launched> {
   const port = options.port ?? (await freePort());
   const [command, args] = options.isThroughNpm
-    ? ['npm', ['start']]
-    : [process.execPath, ['server/bin/start.mjs']];
+    ? ['npm', options.isDevelopment ? ['run', 'dev'] : ['start']]
+    : [process.execPath, ['server/bin/start.mjs', ...(options.isDevelopment ? ['--dev'] : [])]];
   const child = spawnTied(command, args, {
     cwd: ROOT,
     env: {

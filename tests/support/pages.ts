@@ -1,3 +1,4 @@
+import { setTimeout as wait } from 'node:timers/promises';
 import type { APIRequestContext } from 'playwright-core';
 import { z } from 'zod';
 import { paths } from '../../src/paths.ts';
@@ -5,8 +6,8 @@ import { paths } from '../../src/paths.ts';
 export interface DrawnPage {
   name: string;
   path: string;
-  /** Drawn for somebody signed out. */
-  isPublic: boolean;
+  /** For whom it is drawn; null for somebody signed out. */
+  as: 'member' | 'admin' | null;
 }
 
 const one = z.object({ id: z.uuid() });
@@ -37,9 +38,16 @@ export async function everyPage(request: APIRequestContext, baseURL: string): Pr
     ['home', paths.home],
     ['sign-in', paths.signIn],
     ['sign-up', paths.signUp],
+    ['forgottenPassword', paths.forgottenPassword],
+    ['newPassword', `${paths.newPassword}?token=none`],
+    ['confirmAddress', `${paths.confirmAddress}?token=none`],
+    ['mailbox', paths.mailbox],
+    ['mailboxMessage', paths.mailboxMessage(await mailId(request, baseURL))],
+    ['interface', paths.interface],
     ['not-found', '/nothing-here'],
   ];
   const signedIn: [keyof typeof paths, string][] = [
+    ['account', paths.account],
     ['people', paths.people],
     ['newPerson', paths.newPerson],
     ['person', paths.person(personId)],
@@ -48,7 +56,10 @@ export async function everyPage(request: APIRequestContext, baseURL: string): Pr
     ['measurementSet', paths.measurementSet(personId, measurementSetId)],
     ['patterns', paths.patterns],
     ['pattern', paths.pattern(patternId)],
+    ['newPattern', paths.newPattern],
     ['editPattern', paths.editPattern(patternId)],
+    ['editTable', paths.editTable(patternId)],
+    ['compareRevisions', paths.compareRevisions(patternId)],
     ['revision', paths.revision(patternId, revisionId)],
     ['newImport', paths.newImport],
     ['import', paths.import(draftId)],
@@ -56,9 +67,12 @@ export async function everyPage(request: APIRequestContext, baseURL: string): Pr
     ['plans', paths.plans],
     ['plan', paths.plan(plan.id)],
   ];
+  const admin: (keyof typeof paths)[] = ['adminPeople', 'adminRequests', 'adminMail', 'adminLog'];
+  admin.push('adminHealth', 'adminReference');
   return [
-    ...open.map(([name, path]) => ({ name, path, isPublic: true })),
-    ...signedIn.map(([name, path]) => ({ name: kebab(name), path, isPublic: false })),
+    ...open.map(([name, path]) => ({ name: kebab(name), path, as: null })),
+    ...signedIn.map(([name, path]) => ({ name: kebab(name), path, as: 'member' as const })),
+    ...admin.map((name) => ({ name: kebab(name), path: String(paths[name]), as: 'admin' as const })),
   ];
 }
 
@@ -74,6 +88,26 @@ async function draft(api: Api): Promise<string> {
   const file = { name: 'tunic.csv', mimeType: 'text/csv', buffer: Buffer.from(CHART) };
   await api.upload(`/api/imports/${id}/tables/chart`, { file });
   return id;
+}
+
+const WAIT_MS = 10_000;
+
+/** A mail in the mailbox, sent for the purpose; where there is no mailbox, an id that leads to nothing. */
+async function mailId(request: APIRequestContext, baseURL: string): Promise<string> {
+  const until = Date.now() + WAIT_MS;
+  const list = () => request.get(`${baseURL}/api/mailbox`);
+  if (!(await list()).ok()) return '0190a000-0000-7000-8000-000000000001';
+  const email = z
+    .object({ email: z.string() })
+    .parse(await (await request.get(`${baseURL}/api/account`)).json()).email;
+  const headers = { origin: baseURL };
+  await request.post(`${baseURL}/api/auth/request-password-reset`, { headers, data: { email } });
+  for (;;) {
+    const { items } = z.object({ items: z.array(one) }).parse(await (await list()).json());
+    if (items[0]) return items[0].id;
+    if (Date.now() > until) throw new Error('No mail came into the mailbox.');
+    await wait(100);
+  }
 }
 
 function apiOf(request: APIRequestContext, baseURL: string) {

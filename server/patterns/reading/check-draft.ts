@@ -1,5 +1,6 @@
 import type { DraftDetails, ImportIssue, ImportTable } from '../../../shared/patterns/imports.schema.ts';
-import { errorAt, listed, quote } from './issues.ts';
+import { listed, quote } from '../../../shared/patterns/quote.ts';
+import { errorAt } from './issues.ts';
 
 /** What a pattern must have beside its tables, and what is said where it is missing. */
 const NEEDED = {

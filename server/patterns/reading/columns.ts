@@ -8,8 +8,9 @@ import type {
   TableRole,
 } from '../../../shared/patterns/imports.schema.ts';
 import type { LengthUnit } from '../../../shared/units.ts';
-import { isBlank } from './read-cell.ts';
-import { cautionAt, errorAt, listed, quote, shorten } from './issues.ts';
+import { isBlank } from '../../../shared/patterns/read-cell.ts';
+import { listed, quote, shorten } from '../../../shared/patterns/quote.ts';
+import { cautionAt, errorAt } from './issues.ts';
 
 /** The most characters that are kept of a heading. */
 const HEADING_MAX = 120;

@@ -9,7 +9,8 @@ import type {
 import type { StoredFile } from '../../../shared/patterns/patterns.schema.ts';
 import { decideColumns, findHeadingRow } from './columns.ts';
 import { decode } from './decode.ts';
-import { cautionAt, errorAt, quote } from './issues.ts';
+import { quote } from '../../../shared/patterns/quote.ts';
+import { cautionAt, errorAt } from './issues.ts';
 import { readRows, sayEmpty, sayFalling } from './rows.ts';
 import { settleUnits } from './settle-units.ts';
 import { readSheet, type Sheet } from './sheet.ts';

@@ -4,8 +4,9 @@ import type {
   ImportTable,
   TableRole,
 } from '../../../shared/patterns/imports.schema.ts';
-import { cautionAt, errorAt, quote, shorten } from './issues.ts';
-import { CELL_MAX, isBlank, middleOf, readCell } from './read-cell.ts';
+import { quote, shorten } from '../../../shared/patterns/quote.ts';
+import { cautionAt, errorAt } from './issues.ts';
+import { CELL_MAX, isBlank, middleOf, readCell } from '../../../shared/patterns/read-cell.ts';
 
 /** The most characters a size's name may have. */
 const LABEL_MAX = 40;

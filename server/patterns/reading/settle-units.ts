@@ -3,9 +3,10 @@ import { pointName } from '../../../shared/points/catalogue.ts';
 import type { ImportIssue, ImportTable, TableRole } from '../../../shared/patterns/imports.schema.ts';
 import { LENGTH_UNITS, printLengthWithUnit, type LengthUnit } from '../../../shared/units.ts';
 import type { Column } from './columns.ts';
-import { cautionAt, listed, quote } from './issues.ts';
+import { listed, quote } from '../../../shared/patterns/quote.ts';
+import { cautionAt } from './issues.ts';
 import { howPlausible } from './plausible.ts';
-import { middleOf, readCell } from './read-cell.ts';
+import { middleOf, readCell } from '../../../shared/patterns/read-cell.ts';
 
 /** What the unit of a table is settled from. `around` are titles and the size heading: “all in inches”. */
 export interface UnitEvidence {

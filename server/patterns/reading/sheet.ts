@@ -1,7 +1,7 @@
 import Papa from 'papaparse';
 import { SIZES_MAX } from '../../../shared/fit/fit.schema.ts';
 import type { ImportIssue } from '../../../shared/patterns/imports.schema.ts';
-import { unguardText } from './guard.ts';
+import { unguardText } from '../../../shared/patterns/guard.ts';
 import { errorAt } from './issues.ts';
 
 /** The most columns a file may have: a column of sizes, the points, and some to leave out. */

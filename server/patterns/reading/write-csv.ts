@@ -3,7 +3,7 @@ import type { TableRole } from '../../../shared/patterns/imports.schema.ts';
 import type { ChartColumn, FinishedColumn, PatternTable } from '../../../shared/patterns/patterns.schema.ts';
 import { pointName } from '../../../shared/points/catalogue.ts';
 import { matchHeading } from '../../../shared/points/headings.ts';
-import { guardText } from './guard.ts';
+import { guardText } from '../../../shared/patterns/guard.ts';
 
 /**
  * One table as a CSV file that reads back to the same lengths: cells as typed, each heading with its unit, and under a name

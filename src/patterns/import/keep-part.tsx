@@ -11,7 +11,8 @@ import { Notice } from '../../ui/notice.tsx';
 import { failureWords } from '../../ui/use-server-errors.ts';
 import { saySizes } from '../pattern-words.ts';
 import { useCommitImport, useDiscardImport } from '../queries.ts';
-import { TABLE_NAMES, type Obstacle } from './obstacles.ts';
+import { TABLE_NAMES } from '../table-names.ts';
+import type { Obstacle } from './obstacles.ts';
 
 interface KeepPartProps {
   draft: ImportDraft;

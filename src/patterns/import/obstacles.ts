@@ -1,5 +1,6 @@
 import type { ImportDraft, TableRole } from '../../../shared/patterns/imports.schema.ts';
 import { DETAILS_FIELDS, missingDetails, type DetailsValues, type KeptDetails } from '../details-values.ts';
+import { TABLE_NAMES } from '../table-names.ts';
 import { noteIssues } from './notes.ts';
 import { dropId } from './table-file.tsx';
 
@@ -8,11 +9,6 @@ export interface Obstacle {
   words: string;
   targetId: string | null;
 }
-
-export const TABLE_NAMES: Record<TableRole, string> = {
-  chart: 'the size chart',
-  finished: 'the finished measurements',
-};
 
 /** Everything that keeps a draft from being kept, in the order of the page. */
 export function obstaclesOf(draft: ImportDraft, typed: DetailsValues, kept: KeptDetails): Obstacle[] {

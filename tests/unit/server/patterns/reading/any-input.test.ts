@@ -5,7 +5,7 @@ import { patternTableSchema } from '../../../../../shared/patterns/patterns.sche
 import { printLength } from '../../../../../shared/units.ts';
 import { buildTable } from '../../../../../server/patterns/reading/build-table.ts';
 import { isReady } from '../../../../../server/patterns/reading/check-draft.ts';
-import { readCell } from '../../../../../server/patterns/reading/read-cell.ts';
+import { readCell } from '../../../../../shared/patterns/read-cell.ts';
 import { writeCsv } from '../../../../../server/patterns/reading/write-csv.ts';
 import { read } from './reading.ts';
 

@@ -3,7 +3,7 @@ import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
 import type { PatternTable } from '../../../../../shared/patterns/patterns.schema.ts';
 import { buildTable } from '../../../../../server/patterns/reading/build-table.ts';
-import { guardText, unguardText } from '../../../../../server/patterns/reading/guard.ts';
+import { guardText, unguardText } from '../../../../../shared/patterns/guard.ts';
 import { writeCsv } from '../../../../../server/patterns/reading/write-csv.ts';
 import { places, read } from './reading.ts';
 

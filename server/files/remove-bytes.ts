@@ -1,5 +1,5 @@
 import type { Logger } from 'pino';
-import type { FileStore } from '../files/file-store.ts';
+import type { FileStore } from './file-store.ts';
 
 /**
  * Removes bytes that no row refers to any more. The rows went first, so what cannot be removed now is a leftover, not a

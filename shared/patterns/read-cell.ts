@@ -1,14 +1,8 @@
-import { LENGTH_MAX_MM, type Measured } from '../../../shared/fit/fit.schema.ts';
-import type { TableRole } from '../../../shared/patterns/imports.schema.ts';
-import {
-  parseLength,
-  printLength,
-  type LengthError,
-  type LengthUnit,
-  type ParsedLength,
-} from '../../../shared/units.ts';
+import { LENGTH_MAX_MM, type Measured } from '../fit/fit.schema.ts';
+import type { TableRole } from './imports.schema.ts';
+import { parseLength, printLength, type LengthError, type LengthUnit, type ParsedLength } from '../units.ts';
 import { isFormula } from './guard.ts';
-import { quote } from './issues.ts';
+import { quote } from './quote.ts';
 
 /** The shortest length, in mm, that is taken for a measurement. */
 export const LENGTH_MIN_MM = 5;
@@ -29,7 +23,7 @@ export function isBlank(text: string): boolean {
   return BLANK.test(text);
 }
 
-/** Reads one cell: a length or, in a size chart, a range of them. `assumed` is the unit where the cell writes none. */
+/** Reads one cell: a length or, in a size chart, a range of them. `assumed` is the unit where the cell writes none. Never throws. */
 export function readCell(text: string, assumed: LengthUnit, role: TableRole): CellReading {
   if (isBlank(text)) return { kind: 'blank' };
   if (text.length > CELL_MAX) {
