@@ -23,7 +23,7 @@ describe('the list of patterns', () => {
     await page.goto('/patterns');
     const list = page.getByRole('list', { name: 'Patterns' });
     await list.waitFor();
-    expect(await list.getByRole('listitem').count()).toBe(2);
+    await expect.poll(() => list.getByRole('listitem').count()).toBe(2);
     await expectAccessible(page);
     await page.getByLabel('Kind of garment').selectOption('skirt');
     await page.waitForURL(/kind=skirt/);
