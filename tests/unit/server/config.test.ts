@@ -26,6 +26,7 @@ describe('readConfig', () => {
       mailFrom: 'Leeway <leeway@127.0.0.1>',
       trustProxy: 0,
       isDemo: true,
+      hasMailbox: true,
     });
   });
 
@@ -88,6 +89,7 @@ describe('readConfig', () => {
       mailFrom: 'Leeway <post@example.org>',
       trustProxy: ['loopback', '10.0.0.0/8'],
       isDemo: false,
+      hasMailbox: false,
     });
     expect(read({ TRUST_PROXY: '2' }).trustProxy).toBe(2);
   });
@@ -99,6 +101,15 @@ describe('readConfig', () => {
     ['a database of its own', { DATABASE_URL: 'mysql://u:p@127.0.0.1/leeway' }],
   ])('makes no demo with %s', (_name, environment) => {
     expect(read(environment).isDemo).toBe(false);
+  });
+
+  it.each([
+    ['a mail server', { SMTP_URL: 'smtp://127.0.0.1:25' }],
+    ['a proxy in front', { TRUST_PROXY: '1' }],
+    ['an address that others type', { APP_URL: 'https://leeway.example.org' }],
+    ['another address', { HOST: '0.0.0.0' }],
+  ])('has no mailbox page with %s', (_name, environment) => {
+    expect(read(environment).hasMailbox).toBe(false);
   });
 
   it('accepts changes from every address of this machine where it listens on all of them', () => {
