@@ -168,6 +168,7 @@ describe('mail', () => {
 describe('health and reference', () => {
   it('tells the version, the database, the disk and the mail', async () => {
     const page = await visit.open('/admin/health', { as: 'admin' });
+    await heading(page, 'Health').waitFor();
     const facts = await page.getByRole('main').innerText();
     expect(facts).toContain('MariaDB');
     expect(facts).toMatch(/(\d+) of \1 migrations applied/);
