@@ -6,6 +6,8 @@ import { Problem } from './problem.ts';
 /** Answers every thrown thing as `application/problem+json`; what nobody foresaw is logged and answered bare. */
 export function handleErrors(log: Logger): ErrorRequestHandler {
   return (error: unknown, request, response, _next) => {
+    // Who walks away in the middle of a download has broken nothing, and hears nothing more.
+    if (response.destroyed && isCutShort(error)) return;
     const problem = toProblem(error);
     const requestId = requestIdOf(request.id);
     if (problem.status >= 500) log.error({ requestId, ...describe(error) }, 'a request failed');
@@ -20,6 +22,9 @@ export function handleErrors(log: Logger): ErrorRequestHandler {
       .send(JSON.stringify(problem.toBody(requestId)));
   };
 }
+
+const isCutShort = (error: unknown): boolean =>
+  error instanceof Error && 'code' in error && error.code === 'ERR_STREAM_PREMATURE_CLOSE';
 
 /** Nothing is mounted at this address. */
 export const noSuchAddress: RequestHandler = () => {

@@ -3,7 +3,7 @@ import { useForm } from 'react-hook-form';
 import { z } from 'zod';
 import { tokenInputSchema, type NewToken, type TokenScope } from '../../shared/tokens/tokens.schema.ts';
 import { Button } from '../ui/button.tsx';
-import { CheckboxList } from '../ui/checkbox-list.tsx';
+import { ChoiceList } from '../ui/choice-list.tsx';
 import { SelectField, TextField } from '../ui/field.tsx';
 import { FormErrors } from '../ui/form-errors.tsx';
 import { summaryOf, useServerErrors } from '../ui/use-server-errors.ts';
@@ -49,12 +49,13 @@ export function TokenForm({ onMade, onCancel }: TokenFormProps) {
         autoComplete="off"
         error={errors.name?.message}
       />
-      <CheckboxList
+      <ChoiceList
+        isMany
         {...form.register('scopes')}
         id="scopes"
         label="What it may do"
         hint="Changing does not include reading."
-        boxes={SCOPE_BOXES}
+        choices={SCOPE_BOXES}
         error={errors.scopes?.message}
       />
       <SelectField

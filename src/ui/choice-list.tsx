@@ -13,10 +13,13 @@ type ChoiceListProps = Omit<ComponentProps<'input'>, 'type' | 'value'> & {
   hint?: ReactNode;
   error?: string | undefined;
   choices: readonly ListedChoice[];
+  /** Any number of them may be chosen, not one. */
+  isMany?: boolean;
 };
 
-/** One of a few, a line each with what it means. The rest of its properties go to every radio. */
-export function ChoiceList({ label, hint, error, choices, id, className, ...input }: ChoiceListProps) {
+/** One of a few, or any number of them, a line each with what it means. The other properties go to every box. */
+export function ChoiceList(props: ChoiceListProps) {
+  const { label, hint, error, choices, isMany = false, id, className, ...input } = props;
   const made = useId();
   const listId = id ?? made;
   const described = [
@@ -35,10 +38,10 @@ export function ChoiceList({ label, hint, error, choices, id, className, ...inpu
         {choices.map((choice, index) => (
           <label
             key={choice.value}
-            className="grid min-h-11 grid-cols-[auto_1fr] items-baseline gap-x-2.5 border-b border-rule py-2.5 sm:grid-cols-[auto_9rem_1fr]"
+            className="grid min-h-11 grid-cols-[auto_1fr] items-baseline gap-x-2.5 border-b border-rule py-2.5 sm:grid-cols-[auto_11rem_1fr]"
           >
             <input
-              type="radio"
+              type={isMany ? 'checkbox' : 'radio'}
               {...input}
               // The list's own id leads to its first choice, so that a link from a summary can land here.
               id={index === 0 ? listId : `${listId}-${choice.value}`}
