@@ -8,6 +8,9 @@ import { dataFolder, openDatabase, pathFrom, root, run, say, temporaryFolder } f
 import { lockFolder } from './lock.mjs';
 import { Sentence, step } from './steps.mjs';
 
+/** How often a busy instance is looked at anew before a file is held to be missing. */
+const LOOKS = 10;
+
 await run(async ([name, ...more]) => {
   if (more.length > 0 || name?.startsWith('-'))
     throw new Sentence('Say where to: npm run backup -- file.tgz');
@@ -30,22 +33,15 @@ await run(async ([name, ...more]) => {
   tell(file, staging, manifest);
 });
 
-/**
- * Files are linked before and after the tables are read: one removed in between is still there, and one added is too.
- * What the tables of that moment do not name is then left out.
- */
 async function gather(url, folder, staging) {
-  const from = join(folder, 'files');
-  const to = join(staging, PARTS.files);
-  mkdirSync(to, { mode: 0o700 });
-  linkFiles(from, to);
-  const { dumped, sha256 } = await dump(url, join(staging, PARTS.dump));
-  linkFiles(from, to);
-  const kept = new Set();
-  for (const path of filesBelow(to)) {
-    if (dumped.values.has(basename(path))) kept.add(basename(path));
-    else rmSync(join(to, path));
+  let moment = await takeMoment(url, folder, staging);
+  // One written and removed between two looks is on no list the next time; one missing twice is truly not there.
+  for (let look = 1, before = new Set(); look < LOOKS; look += 1) {
+    if (moment.missing.every((id) => before.has(id))) break;
+    before = new Set(moment.missing);
+    moment = await takeMoment(url, folder, staging);
   }
+  const { dumped, sha256, files, missing } = moment;
   for (const part of [PARTS.secret, PARTS.signIns]) {
     if (existsSync(join(folder, part))) copyFileSync(join(folder, part), join(staging, part));
   }
@@ -55,11 +51,32 @@ async function gather(url, folder, staging) {
     mariaDb: dumped.serverVersion,
     madeAt: new Date().toISOString(),
     rows: dumped.rows,
-    files: kept.size,
+    files,
     dumpSha256: sha256,
   };
   writeFileSync(join(staging, PARTS.manifest), `${JSON.stringify(manifest, null, 2)}\n`, { mode: 0o600 });
-  return { ...manifest, missing: [...dumped.values].filter((id) => !kept.has(id)).length };
+  return { ...manifest, missing: missing.length };
+}
+
+/**
+ * Files are linked before and after the tables are read: one removed in between is still there, and one added is too.
+ * What the tables of that moment do not name is then left out.
+ */
+async function takeMoment(url, folder, staging) {
+  const from = join(folder, 'files');
+  const to = join(staging, PARTS.files);
+  mkdirSync(to, { recursive: true, mode: 0o700 });
+  rmSync(join(staging, PARTS.dump), { force: true });
+  linkFiles(from, to);
+  const { dumped, sha256 } = await dump(url, join(staging, PARTS.dump));
+  linkFiles(from, to);
+  const kept = new Set();
+  for (const path of filesBelow(to)) {
+    if (dumped.values.has(basename(path))) kept.add(basename(path));
+    else rmSync(join(to, path));
+  }
+  const missing = [...dumped.values].filter((id) => !kept.has(id));
+  return { dumped, sha256, files: kept.size, missing };
 }
 
 async function dump(url, path) {

@@ -230,7 +230,7 @@ describe('an import', () => {
     await page.getByText(/^Ready: 3 sizes, 10 to 14, with the finished measurements/).waitFor();
     await page.getByRole('button', { name: 'Keep these tables' }).click();
     await page.getByText('Revision 2, shown here').waitFor();
-    await page.getByRole('link', { name: 'Revision 1' }).click();
+    await page.getByRole('link', { name: 'Revision 1', exact: true }).click();
     await page.waitForURL(new RegExp(`${revisionId}$`));
     await page.getByText('These tables were replaced since.').waitFor();
     await expectAccessible(page);
