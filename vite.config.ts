@@ -57,8 +57,7 @@ export default defineConfig({
           globalSetup: [...globalSetup, 'tests/support/served-app.ts'],
           testTimeout: 2 * MINUTE,
           hookTimeout: 2 * MINUTE,
-          // A scan may meet a page between two frames on a busy machine. A fault of ours fails twice, and the report
-          // says what needed its second try.
+          // A scan may meet a page between two frames on a busy machine; a fault of ours fails twice.
           retry: 1,
         },
       },
