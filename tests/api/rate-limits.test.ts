@@ -42,17 +42,11 @@ describe('rate limits', () => {
   it('let through no more than twenty of a thousand wrong passwords for one account from a thousand addresses', async () => {
     const { user } = await test.signedIn();
     const counts: Record<number, number> = {};
-    const slowest: number[] = [];
     for (let round = 0; round < 50; round += 1) {
       const answers = await Promise.all(
-        Array.from({ length: 20 }, async (_, at) => {
-          const began = performance.now();
-          const { status } = await guess(`10.${String(round)}.0.${String(at)}`, user.email);
-          slowest.push(performance.now() - began);
-          return status;
-        }),
+        Array.from({ length: 20 }, (_, at) => guess(`10.${String(round)}.0.${String(at)}`, user.email)),
       );
-      for (const status of answers) counts[status] = (counts[status] ?? 0) + 1;
+      for (const { status } of answers) counts[status] = (counts[status] ?? 0) + 1;
     }
     expect(counts).toEqual({ 401: 20, 429: 980 });
     const right = await guess('192.0.2.1', user.email, PASSWORD);
